@@ -47,6 +47,12 @@ export interface Saturation {
   readonly surfaceTension: number | undefined;
 }
 
+/** Outer limits of a formulation, kelvin and pascal. */
+export interface FluidRange {
+  readonly T: readonly [number, number];
+  readonly p: readonly [number, number];
+}
+
 export interface Fluid {
   readonly name: string;
   readonly synonyms: readonly string[];
@@ -55,7 +61,7 @@ export interface Fluid {
   /** Bibliography keys, the formulation first. */
   readonly sources: readonly string[];
   /** Outer limits of the formulation; `state` may refuse inside them (two-phase, melting). */
-  readonly range: { readonly T: readonly [number, number]; readonly p: readonly [number, number] };
+  readonly range: FluidRange;
   /** kg/mol; undefined for mixtures of unknown make-up. */
   readonly molarMass: number | undefined;
   readonly critical: { readonly T: number; readonly p: number } | undefined;
