@@ -45,6 +45,8 @@ export interface Saturation {
   readonly latentHeat: number;
   /** N/m; undefined where no published formulation exists. */
   readonly surfaceTension: number | undefined;
+  /** False where an own table gives no vapour cp, so that `vapour.cp` stands for nothing. */
+  readonly vapourCpGiven?: boolean;
 }
 
 /** Outer limits of a formulation, kelvin and pascal. */
@@ -71,6 +73,11 @@ export interface Fluid {
   readonly flashPoint?: number;
   /** True where density is a table's constant, so that a density difference says nothing about buoyancy. */
   readonly constantDensity: boolean;
+  /**
+   * True where an own table gives no density, only kinematic viscosity, diffusivity and conductivity: 1 kg/m³ stands in its place. Density, cp and
+   * viscosity are then no figures to show or to use with a mass flow; their ratios hold.
+   */
+  readonly densityAssumed?: boolean;
   /** The state at kelvin and pascal, or the sentence that says why there is none and what the nearest limit is. */
   state(T: number, p: number): State | Problem;
   /** Density alone, for buoyancy; same refusals as `state`. */

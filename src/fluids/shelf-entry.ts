@@ -13,6 +13,10 @@ export interface NameParameter {
   readonly otherwise?: number;
   /** How per cent may be counted; the first is the one meant when the name does not say. Absent where it is not a concentration. */
   readonly bases?: readonly Basis[];
+  /** True where g/kg may stand for a tenth of a per cent, as for salinity. */
+  readonly perMille?: boolean;
+  /** A usual number, for the examples in messages. */
+  readonly example?: number;
 }
 
 /** How a concentration is counted. */

@@ -1,0 +1,43 @@
+/** Which fluids a misspelt or half-remembered name may have meant. */
+import type { ShelfEntry } from "./shelf-entry.js";
+
+/** At most three entries, the nearest first; none where nothing is near. */
+export function nearMisses(name: string, entries: readonly ShelfEntry[]): readonly ShelfEntry[] {
+  const wanted = name.normalize("NFKC").toLowerCase().trim();
+  if (wanted === "") return [];
+  return entries
+    .map((entry) => ({ entry, distance: Math.min(...[entry.name, ...entry.synonyms].map((one) => distanceTo(wanted, one.toLowerCase()))) }))
+    .filter(({ distance }) => distance < 0.45)
+    .sort((a, b) => a.distance - b.distance)
+    .slice(0, 3)
+    .map(({ entry }) => entry);
+}
+
+/** 0 for the same word, 1 for nothing in common: the share of letters to change, or less where one text holds a whole word of the other. */
+function distanceTo(wanted: string, candidate: string): number {
+  const letters = edits(wanted, candidate) / Math.max(wanted.length, candidate.length);
+  const shared = wordsOf(candidate).filter((word) => word.length > 2 && wordsOf(wanted).some((other) => edits(other, word) <= word.length / 6));
+  return shared.length > 0 ? Math.min(letters, 0.4 - 0.05 * shared.length) : letters;
+}
+
+function wordsOf(text: string): readonly string[] {
+  return text.split(/[^a-z0-9]+/).filter((word) => word !== "");
+}
+
+/** Insertions, deletions, substitutions and swaps of neighbours that lead from one text to the other. */
+function edits(a: string, b: string): number {
+  const width = b.length + 1;
+  const cost = new Uint16Array((a.length + 1) * width);
+  const at = (i: number, j: number): number => cost[i * width + j] as number;
+  for (let i = 0; i <= a.length; i++) cost[i * width] = i;
+  for (let j = 0; j <= b.length; j++) cost[j] = j;
+  for (let i = 1; i <= a.length; i++) {
+    for (let j = 1; j <= b.length; j++) {
+      const change = a[i - 1] === b[j - 1] ? 0 : 1;
+      let best = Math.min(at(i - 1, j) + 1, at(i, j - 1) + 1, at(i - 1, j - 1) + change);
+      if (i > 1 && j > 1 && a[i - 1] === b[j - 2] && a[i - 2] === b[j - 1]) best = Math.min(best, at(i - 2, j - 2) + 1);
+      cost[i * width + j] = best;
+    }
+  }
+  return at(a.length, b.length);
+}
