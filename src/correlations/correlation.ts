@@ -38,6 +38,8 @@ export interface Correlation {
   readonly wall: "isothermal" | "uniform flux" | "either";
   /** Where properties are taken; "film" is the mean of surface and bulk. Wall values are the symbols with suffix w (Prw, muw). */
   readonly propertiesAt: "film" | "bulk" | "other";
+  /** Where propertiesAt is "other": the fraction of the way from bulk to surface (0.5 would be the film). */
+  readonly towardsSurface?: number;
   /** In words where propertiesAt is "other" or more must be said. */
   readonly propertiesNote?: string;
   /** What the length in the groups is, in the words of the source. */

@@ -9,7 +9,6 @@ export interface Step {
   readonly symbol: string;
   readonly meaning: string;
   readonly value: number | string;
-  readonly dimension: Dimension | "other";
   /** SI unit as text, "" for pure numbers. */
   readonly unit: string;
   readonly kind: StepKind;
@@ -71,9 +70,9 @@ export interface EquationShown {
 }
 
 /** A value that a word asked for: SI with its dimension, a text, or the problem that stands in its place. */
-export type WordValue = { readonly value: number; readonly dimension: Dimension | "other" } | string | Problem;
+export type WordValue = { readonly value: number; readonly dimension: Dimension } | string | Problem;
 
-/** What one case of one surface comes to. Everything but the state, h and the verdict is worked out when it is asked for. */
+/** What one case of one surface comes to. Everything but the point itself is worked out when it is asked for. */
 export interface Finding {
   readonly functionId: string;
   /** Short sentence: "in range", or what is wrong, first things first. */
@@ -81,7 +80,7 @@ export interface Finding {
   readonly inRange: boolean;
   /** True where h, Nu and q may be shown (in range, or out of range with `beyond range = flag`). */
   readonly answered: boolean;
-  /** The value of any word of `give` for one case, in SI. */
+  /** The value of any word of `give` but the blocks, in SI. */
   word(name: string): WordValue;
   readonly h: number | undefined;
   readonly hLow: number | undefined;

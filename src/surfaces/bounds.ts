@@ -1,0 +1,269 @@
+import { isProblem } from "../quantities/problems.js";
+import { candidatesFor, choose, decadesOutside } from "./choice.js";
+import { circumstancesOf, evaluateWith, type Nudge, type Point } from "./point.js";
+import { runnerOf } from "./runner.js";
+import { Scene } from "./scene.js";
+import { type Outcome, outcomeOf, type Solution, solve } from "./solution.js";
+import type { Inputs, Rival, Surface, Tolerance } from "./surface.js";
+
+/** How far one cause alone moves each result: `below` and `above` are zero or positive. */
+export interface Share {
+  readonly cause: string;
+  readonly origin: string;
+  readonly below: Outcome;
+  readonly above: Outcome;
+}
+
+export interface Interval {
+  readonly low: Outcome;
+  readonly high: Outcome;
+  readonly shares: readonly Share[];
+}
+
+const results = ["h", "Nu", "q", "Ts"] as const;
+
+/** Near the edge of its range, within this ratio, an equation's bounds reach to the equation that takes over. */
+const nearEdge = 1.1;
+
+/** The scatter that holds at a point: by regime where the source says so, doubled for each decade outside (common practice). */
+export function scatterAt(point: Point): number {
+  const { scatter } = point.runner.record;
+  let value = scatter.value;
+  if (scatter.by !== undefined) {
+    const slot = point.runner.slot(scatter.by.symbol);
+    const at = slot === undefined ? Number.NaN : (point.values[slot] as number);
+    for (const [upTo, here] of scatter.by.steps) {
+      if (at <= upTo) {
+        value = here;
+        break;
+      }
+    }
+  }
+  return value * 2 ** decadesOutside(point);
+}
+
+/** Low and high of every result at about 95 %, with the share of each cause. */
+export function boundsOf(surface: Surface, inputs: Inputs, solution: Solution): Interval {
+  const nominal = outcomeOf(solution.point);
+  const shares: Share[] = [
+    ...scatterShare(surface, inputs, solution.point, nominal),
+    ...formulationShare(solution.point, nominal),
+    ...inputs.tolerances.flatMap((tolerance) => toleranceShare(surface, inputs, tolerance, nominal)),
+    ...rivalsOf(solution.point).flatMap((rival) => rivalShare(solution.point, rival, nominal)),
+    ...limitShare(solution.point, nominal),
+    ...buoyancyShare(solution.point, nominal),
+    ...edgeShare(surface, inputs, solution.point, nominal),
+    ...switchShare(surface, inputs, solution, nominal),
+  ];
+  const worst = inputs.bounds === "worst";
+  const low: Record<string, number> = {};
+  const high: Record<string, number> = {};
+  for (const name of results) {
+    const below = together(shares, (share) => share.below[name], worst);
+    const above = together(shares, (share) => share.above[name], worst);
+    low[name] = nominal[name] - below;
+    high[name] = nominal[name] + above;
+  }
+  for (const name of ["h", "Nu"] as const) low[name] = Math.max(0, low[name] as number);
+  return { low: low as unknown as Outcome, high: high as unknown as Outcome, shares };
+}
+
+function together(shares: readonly Share[], of: (share: Share) => number, worst: boolean): number {
+  let sum = 0;
+  for (const share of shares) {
+    const part = of(share);
+    sum += worst ? part : part * part;
+  }
+  return worst ? sum : Math.sqrt(sum);
+}
+
+function shareOf(cause: string, origin: string, nominal: Outcome, others: readonly Outcome[]): Share {
+  const below: Record<string, number> = {};
+  const above: Record<string, number> = {};
+  for (const name of results) {
+    let low = 0;
+    let high = 0;
+    for (const other of others) {
+      const change = other[name] - nominal[name];
+      if (change < low) low = change;
+      if (change > high) high = change;
+    }
+    below[name] = -low;
+    above[name] = high;
+  }
+  return { cause, origin, below: below as unknown as Outcome, above: above as unknown as Outcome };
+}
+
+/** A changed film coefficient at the same inputs: under a given flux the surface temperature answers to it. */
+function scaled(point: Point, factor: number): Outcome {
+  if (point.scene.inputs.wall.kind === "temperature") return outcomeOf(point, factor);
+  const again = solve(point.surface, point.scene.inputs, factor);
+  return isProblem(again) ? outcomeOf(point, factor) : outcomeOf(again.point, factor);
+}
+
+function scatterShare(_surface: Surface, _inputs: Inputs, point: Point, nominal: Outcome): Share[] {
+  const { record } = point.runner;
+  const scatter = scatterAt(point);
+  if (scatter === 0) return [];
+  return [
+    shareOf(`scatter of the equation ±${Math.round(1000 * scatter) / 10} %`, record.scatter.origin, nominal, [
+      scaled(point, Math.max(0, 1 - scatter)),
+      scaled(point, 1 + scatter),
+    ]),
+  ];
+}
+
+const formulated = ["density", "cp", "viscosity", "conductivity", "expansivity"] as const;
+
+function formulationShare(point: Point, nominal: Outcome): Share[] {
+  const { fluid, pressure, Tb } = point.scene.inputs;
+  const uncertainty = fluid.uncertainty(Tb + point.runner.fraction * (point.Ts - Tb), pressure);
+  let squares = 0;
+  for (const property of formulated) {
+    const part = uncertainty[property];
+    if (!(part > 0)) continue;
+    const moved = nudged(point, { property, factor: 1 + part });
+    if (moved !== undefined && point.h > 0) squares += (moved / point.h - 1) ** 2;
+  }
+  if (squares === 0) return [];
+  const relative = Math.sqrt(squares);
+  return [shareOf("property formulation", uncertainty.origin, nominal, [scaled(point, 1 - relative), scaled(point, 1 + relative)])];
+}
+
+function nudged(point: Point, nudge: Nudge): number | undefined {
+  if (point.atLimit) return nudge.property === "conductivity" ? point.h * nudge.factor : undefined;
+  const moved = evaluateWith(point.surface, point.scene, point.at, point.runner, point.byDensities, nudge);
+  return isProblem(moved) ? undefined : moved.h;
+}
+
+/** The same inputs with one of them moved, SI. */
+export function shifted(inputs: Inputs, key: string, by: number): Inputs {
+  if (key === "surface") {
+    return inputs.wall.kind === "flux"
+      ? { ...inputs, wall: { kind: "flux", q: inputs.wall.q + by } }
+      : { ...inputs, wall: { kind: "temperature", T: inputs.wall.T + by } };
+  }
+  if (key === "bulk") return { ...inputs, Tb: inputs.Tb + by };
+  if (key === "pressure") return { ...inputs, pressure: inputs.pressure + by };
+  if (key === "gravity") return { ...inputs, gravity: inputs.gravity + by };
+  if (inputs.radiation !== undefined && (key === "emissivity" || key === "surroundings")) {
+    return { ...inputs, radiation: { ...inputs.radiation, [key]: inputs.radiation[key] + by } };
+  }
+  return { ...inputs, numbers: { ...inputs.numbers, [key]: (inputs.numbers[key] ?? 0) + by } };
+}
+
+function toleranceShare(surface: Surface, inputs: Inputs, tolerance: Tolerance, nominal: Outcome): Share[] {
+  const others: Outcome[] = [];
+  for (const by of [-tolerance.halfWidth, tolerance.halfWidth]) {
+    const end = solve(surface, shifted(inputs, tolerance.key, by));
+    if (!isProblem(end)) others.push(outcomeOf(end.point));
+  }
+  const zero = crossing(surface, inputs, tolerance);
+  if (zero !== undefined) others.push(zero);
+  return [shareOf(`tolerance of ${tolerance.name}`, "given with the input", nominal, others)];
+}
+
+/** Where the tolerance changes the sign of the difference, the limit at zero difference lies between its ends. */
+function crossing(surface: Surface, inputs: Inputs, tolerance: Tolerance): Outcome | undefined {
+  if (inputs.wall.kind !== "temperature" || (tolerance.key !== "surface" && tolerance.key !== "bulk")) return undefined;
+  if (Math.abs(inputs.wall.T - inputs.Tb) >= tolerance.halfWidth) return undefined;
+  const even: Inputs =
+    tolerance.key === "surface" ? { ...inputs, wall: { kind: "temperature", T: inputs.Tb } } : { ...inputs, Tb: inputs.wall.T };
+  const there = solve(surface, even);
+  return isProblem(there) ? undefined : outcomeOf(there.point);
+}
+
+export function rivalsOf(point: Point): readonly Rival[] {
+  const { surface } = point;
+  if (surface.rivals === undefined || point.scene.inputs.equation !== undefined || point.scene.inputs.only !== undefined) return [];
+  return surface.rivals(point.at, (symbol) => valueAt(point, symbol), point.runner.record);
+}
+
+export function valueAt(point: Point, symbol: string): number {
+  const slot = point.runner.slot(symbol);
+  if (slot !== undefined) return point.values[slot] as number;
+  return point.scene.inputs.numbers[symbol] ?? Number.NaN;
+}
+
+function rivalShare(point: Point, rival: Rival, nominal: Outcome): Share[] {
+  const { variant } = circumstancesOf(point.surface, point.scene);
+  const other = evaluateWith(point.surface, point.scene, point.at, runnerOf(point.surface, rival.record, variant), point.byDensities);
+  if (isProblem(other) || point.h === 0) return [];
+  return [shareOf(rival.cause, rival.origin, nominal, [scaled(point, other.h / point.h)])];
+}
+
+/** Below the equation's range its limit stands in; the value at the edge of the range is the other end. */
+function limitShare(point: Point, nominal: Outcome): Share[] {
+  const { limit, ranges } = point.runner.record;
+  if (!point.atLimit || limit === undefined) return [];
+  const edge = ranges[limit.of]?.[0];
+  if (edge === undefined) return [];
+  const { law } = point.runner;
+  const values = new Float64Array(law.size);
+  for (const symbol of law.inputs) values[law.slot(symbol)] = symbol === limit.of ? edge : valueAt(point, symbol);
+  law.run(values);
+  const name = law.names[law.names.length - 1] as string;
+  const Nu = values[law.slot(name)] as number;
+  if (!Number.isFinite(Nu)) return [];
+  const h = (Nu * valueAt(point, "k")) / valueAt(point, "L");
+  return [
+    shareOf("from the limit to the lower edge of the range", "published range", nominal, [
+      { h, Nu, q: h * (point.Ts - point.Tref), Ts: point.Ts },
+    ]),
+  ];
+}
+
+function buoyancyShare(point: Point, nominal: Outcome): Share[] {
+  if (!point.byDensities || point.h === 0) return [];
+  const { variant } = circumstancesOf(point.surface, point.scene);
+  const runner = runnerOf(point.surface, point.runner.record, { ...variant, buoyancy: "expansivity" });
+  const other = evaluateWith(point.surface, point.scene, point.at, runner, false);
+  if (isProblem(other)) return [];
+  return [
+    shareOf("buoyancy by expansivity instead of by densities", "common practice", nominal, [scaled(point, other.h / point.h)]),
+  ];
+}
+
+/** Close to the edge of its range, the bounds also hold the equation that would be taken beyond it. */
+function edgeShare(surface: Surface, inputs: Inputs, point: Point, nominal: Outcome): Share[] {
+  if (inputs.equation !== undefined || inputs.only !== undefined || point.atLimit || !point.inRange || point.h === 0) return [];
+  const atEdge = point.runner.ranges.some((range) => {
+    const value = point.values[range.slot] as number;
+    return value > 0 && ((range.low > 0 && value < range.low * nearEdge) || value > range.high / nearEdge);
+  });
+  const candidates = candidatesFor(surface, point.at);
+  if (isProblem(candidates)) return [];
+  const list = candidates as readonly Point["runner"]["record"][];
+  const { variant } = circumstancesOf(surface, point.scene);
+  const others: Outcome[] = [];
+  for (const record of list) {
+    if (record === point.runner.record) {
+      if (!atEdge) break;
+      continue;
+    }
+    const other = evaluateWith(surface, point.scene, point.at, runnerOf(surface, record, variant), point.byDensities);
+    if (isProblem(other)) continue;
+    const preferred = list.indexOf(record) < list.indexOf(point.runner.record);
+    if (preferred && !other.inRange && justOutside(other)) others.push(scaled(point, other.h / point.h));
+    if (!preferred && other.inRange) {
+      others.push(scaled(point, other.h / point.h));
+      break;
+    }
+  }
+  return others.length === 0 ? [] : [shareOf("another equation takes over close by", "published range", nominal, others)];
+}
+
+function justOutside(point: Point): boolean {
+  return decadesOutside(point) < Math.log10(nearEdge);
+}
+
+function switchShare(surface: Surface, inputs: Inputs, solution: Solution, nominal: Outcome): Share[] {
+  if (!solution.atSwitch) return [];
+  const others: Outcome[] = [];
+  for (const factor of [1 - 1e-9, 1 + 1e-9]) {
+    const scene = Scene.at(surface, inputs, solution.point.Ts * factor);
+    const side = isProblem(scene) ? scene : choose(surface, scene);
+    if (!isProblem(side)) others.push(outcomeOf(side));
+  }
+  return [shareOf("both sides of the jump in which the flux falls", "published ranges", nominal, others)];
+}
