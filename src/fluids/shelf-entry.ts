@@ -15,6 +15,8 @@ export interface NameParameter {
   readonly bases?: readonly Basis[];
   /** True where g/kg may stand for a tenth of a per cent, as for salinity. */
   readonly perMille?: boolean;
+  /** Further names that mean this fluid only where a number follows; alone they are another fluid ("ethanol" and "ethanol 40 %"). */
+  readonly namesWithNumber?: readonly string[];
   /** A usual number, for the examples in messages. */
   readonly example?: number;
 }

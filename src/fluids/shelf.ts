@@ -1,11 +1,14 @@
 /** The shelf: every fluid by name, built when first asked for, and the list of them. */
 import { coverageProblem, isProblem, type Problem, valueProblem } from "../quantities/problems.js";
+import { coolants } from "./coolants.js";
 import type { Fluid } from "./fluid.js";
+import { heatTransferLiquids } from "./heat-transfer-liquids.js";
+import { liquidMetals } from "./liquid-metals.js";
 import { nearMisses } from "./near-miss.js";
 import { waterEntry } from "./records/water-entry.js";
 import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 
-const entries: readonly ShelfEntry[] = [waterEntry];
+const entries: readonly ShelfEntry[] = [waterEntry, ...coolants, ...heatTransferLiquids, ...liquidMetals];
 
 /** Every entry, in the order of the list. */
 export function shelf(): readonly ShelfEntry[] {
@@ -35,14 +38,14 @@ function search(text: string): Fluid | Problem {
   const whole = byName().get(keyOf(text));
   if (whole) return buildPlain(whole, text);
   const asked = parseParametrised(text);
-  const entry = asked && byName().get(keyOf(asked.name));
+  const entry = asked && (byNameWithNumber().get(keyOf(asked.name)) ?? byName().get(keyOf(asked.name)));
   if (asked && entry) return buildParametrised(entry, asked);
   return unknown(text);
 }
 
 function buildPlain(entry: ShelfEntry, text: string): Fluid | Problem {
   const { parameter } = entry;
-  if (!parameter || parameter.otherwise !== undefined) return entry.fluid();
+  if (!parameter || parameter.otherwise !== undefined) return entry.fluid(parameter?.otherwise);
   return valueProblem(
     "fluid",
     `"${text}" needs its ${parameter.meaning}, ${spanOf(parameter)}: write for example "${exampleOf(entry)}".`,
@@ -168,6 +171,13 @@ let index: Map<string, ShelfEntry> | undefined;
 function byName(): ReadonlyMap<string, ShelfEntry> {
   index ??= new Map(entries.flatMap((entry) => [entry.name, ...entry.synonyms].map((name) => [keyOf(name), entry] as const)));
   return index;
+}
+
+let indexWithNumber: Map<string, ShelfEntry> | undefined;
+
+function byNameWithNumber(): ReadonlyMap<string, ShelfEntry> {
+  indexWithNumber ??= new Map(entries.flatMap((entry) => (entry.parameter?.namesWithNumber ?? []).map((name) => [keyOf(name), entry] as const)));
+  return indexWithNumber;
 }
 
 /** Whether a text is a fluid's name at all; for callers that must tell a name from a table's header. */
