@@ -1,10 +1,8 @@
 /** A published equation as data. The lines are the equation that runs, that is typeset and that the reviewer recalculates. */
+import type { Table } from "../equations/table.js";
 
 /** A tabulated constant; becomes nested IFs in the algebra, so that it runs and prints like any other line. */
-export type Table =
-  | { readonly of: string; readonly how: "step" | "linear"; readonly rows: readonly (readonly [number, number])[] }
-  | { readonly of: string; readonly how: "key"; readonly rows: readonly (readonly [string, number])[] }
-  | { readonly of: readonly [string, string]; readonly how: "bilinear"; readonly x: readonly number[]; readonly y: readonly number[]; readonly z: readonly (readonly number[])[] };
+export type { Table } from "../equations/table.js";
 
 export type Origin = "published" | "common practice" | "customary" | "from memory";
 
@@ -16,7 +14,7 @@ export interface Scatter {
   readonly by?: { readonly symbol: string; readonly steps: readonly (readonly [number, number])[] };
 }
 
-/** A record evaluated inside another one: each of its symbols gets the suffix `_NAME` unless given in `with`. */
+/** A record evaluated inside another one: its lines and the symbols given in `with` get the suffix `_NAME`; its other symbols are the outer record's. */
 export interface Part {
   readonly of: Correlation;
   /** The part's own symbols replaced by algebra in the outer record's symbols, e.g. `{ Ra: "Ra*COS(RADIANS(tilt))" }`. */
@@ -30,10 +28,10 @@ export interface Correlation {
   readonly name: string;
   /** Surfaces it serves, e.g. ["FREE.PLATE"]. */
   readonly serves: readonly string[];
-  /** Pieces of one published set share this word; the range picks the piece. */
+  /** Pieces of one published set share this word; the range picks the piece, the first listed where several hold. */
   readonly set?: string;
   /** What the last line is. Factors and frictions are used by other records or by surfaces, never offered alone. */
-  readonly result: "Nu" | "factor" | "friction" | "criterion" | "pressure" | "h" | "q";
+  readonly result: "Nu" | "factor" | "friction" | "criterion" | "pressure" | "temperature" | "h" | "q";
   readonly extent: "mean" | "local" | "either";
   readonly wall: "isothermal" | "uniform flux" | "either";
   /** Where properties are taken; "film" is the mean of surface and bulk. Wall values are the symbols with suffix w (Prw, muw). */

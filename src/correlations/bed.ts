@@ -1,0 +1,103 @@
+/** Packed beds: heat transfer and pressure drop. Re is on superficial speed and particle diameter. */
+import type { Correlation } from "./correlation.js";
+
+export const whitaker1972Bed: Correlation = {
+  id: "whitaker-1972-bed",
+  name: "Whitaker, packed bed",
+  serves: ["FORCED.BED"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "bulk",
+  length: "Dp*void/(1-void), Dp = 6V/A",
+  lines: {
+    Rem: "Re/(1-void)",
+    Num: "(0.5*Rem^0.5+0.2*Rem^(2/3))*Pr^(1/3)",
+    Nu: "Num*(1-void)/void",
+  },
+  ranges: { Rem: [22, 8000], Pr: [0.6, 0.8], void: [0.34, 0.78] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.25, origin: "from memory" },
+  source: { work: "whitaker-1972" },
+  confidence: "M",
+  note: "From memory. Rem = u0*Dp/(nu*(1-void)) and Num = h*Dp*void/(k*(1-void)) as the author has them; Re on superficial speed and Nu on the particle diameter. Pr range from gas data.",
+};
+
+export const wakaoKaguei1979Bed: Correlation = {
+  id: "wakao-kaguei-1979-bed",
+  name: "Wakao, Kaguei & Funazkri, packed bed",
+  serves: ["FORCED.BED"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "film",
+  length: "particle diameter",
+  lines: { Nu: "2+1.1*Re^0.6*Pr^(1/3)" },
+  ranges: { Re: [15, 8500], Pr: [0.6, 1000] },
+  rangeOrigin: "published",
+  scatter: { value: 0.25, origin: "common practice" },
+  source: { work: "wakao-kaguei-1979" },
+  confidence: "N",
+  note: "Re on superficial speed and particle diameter. Fluid dispersion included in its derivation. Printed also as 3 < Re < 1e4 or 3e3.",
+};
+
+export const gnielinski1982Bed: Correlation = {
+  id: "gnielinski-1982-bed",
+  name: "Gnielinski, packed bed of spheres",
+  serves: ["FORCED.BED"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "bulk",
+  propertiesNote: "mean of inlet and outlet bulk",
+  length: "particle diameter",
+  lines: {
+    Ree: "Re/void",
+    Nulam: "0.664*Ree^0.5*Pr^(1/3)",
+    Nuturb: "0.037*Ree^0.8*Pr/(1+2.443*(Pr^(2/3)-1)/Ree^0.1)",
+    Nu: "(1+1.5*(1-void))*(2+SQRT(Nulam^2+Nuturb^2))",
+  },
+  ranges: { Ree: [0.1, 2e4], Pr: [0.6, 1e4], void: [0.26, 0.93] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "gnielinski-1982", at: "also VDI Heat Atlas, sect. G9" },
+  confidence: "N",
+  note: "Re on superficial speed. Pe above 500 to 1000; below, axial mixing lowers the apparent h. Shape factor: cylinders 1.6, cubes 1.6, rings 2.1 in place of 1+1.5*(1-void).",
+};
+
+export const gupta1974Bed: Correlation = {
+  id: "gupta-1974-bed",
+  name: "Gupta, Chaube & Upadhyay, packed bed (j factor)",
+  serves: ["FORCED.BED"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "bulk",
+  propertiesNote: "mean of inlet and outlet bulk",
+  length: "particle diameter",
+  lines: { Nu: "2.06/void*Re^0.425*Pr^(1/3)" },
+  ranges: { Re: [90, 4000], Pr: [0.6, 0.8], void: [0.3, 0.5] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.25, origin: "common practice" },
+  source: { work: "gupta-1974", at: "form in Incropera et al., Fundamentals of Heat and Mass Transfer" },
+  confidence: "M",
+  note: "From memory. 50 % above Wakao at Re 500: never a default. void*jH = 2.06*Re^(-0.575), Nu = jH*Re*Pr^(1/3).",
+};
+
+export const ergun1952Bed: Correlation = {
+  id: "ergun-1952-bed",
+  name: "Ergun, pressure drop of a bed (dp/L*Dp*void^3/(rho*u0^2*(1-void)))",
+  serves: ["FORCED.BED"],
+  result: "pressure",
+  extent: "either",
+  wall: "either",
+  propertiesAt: "bulk",
+  length: "particle diameter",
+  lines: { f: "150*(1-void)/Re+1.75" },
+  ranges: { Re: [1, 3000], void: [0.35, 0.55] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.25, origin: "common practice" },
+  source: { work: "ergun-1952" },
+  confidence: "M",
+  note: "From memory. Range usually stated on Re/(1-void): 1 to 2500.",
+};

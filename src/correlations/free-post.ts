@@ -1,0 +1,97 @@
+/** Free convection on vertical cylinders. Ra, Gr and Nu are on the height. */
+import type { Correlation } from "./correlation.js";
+
+export const lefevreEde1956Post: Correlation = {
+  id: "lefevre-ede-1956-post",
+  name: "Le Fevre & Ede, vertical cylinder, laminar",
+  serves: ["FREE.POST"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "film",
+  length: "height",
+  lines: { Nu: "(4/3)*(7*Ra*Pr/(5*(20+21*Pr)))^0.25+4*(272+315*Pr)*slender/(35*(64+63*Pr))" },
+  ranges: { Ra: [100, 1e9] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.1, origin: "common practice" },
+  source: { work: "le-fevre-ede-1956" },
+  confidence: "N",
+  note: "slender = height/diameter. Integral method, first two terms (its plate limit is 6 % above the exact layer at Pr 0.7): good while the second is smaller than the first.",
+};
+
+export const popiel2007Post: Correlation = {
+  id: "popiel-2007-post",
+  name: "Popiel, Wojtkowiak & Bober, vertical cylinder after Cebeci",
+  serves: ["FREE.POST"],
+  result: "factor",
+  extent: "either",
+  wall: "isothermal",
+  propertiesAt: "film",
+  length: "height",
+  lines: {
+    B: "0.0571322+0.20305*Pr^(-0.43)",
+    C: "0.9165-0.0043*Pr^0.5+0.01333*LN(Pr)+0.0004809/Pr",
+    Factor: "1+B*(32^0.5*Gr^(-0.25)*slender)^C",
+  },
+  ranges: { Pr: [0.01, 100] },
+  rangeOrigin: "published",
+  scatter: { value: 0.1, origin: "common practice" },
+  source: { work: "popiel-2007" },
+  confidence: "N",
+  note: "Multiplies the laminar plate Nu without its low-Ra constant. Some reviews misprint 32^0.5 as 32^2. Laminar, Gr on height.",
+};
+
+export const sparrowGregg1956SlenderTest: Correlation = {
+  id: "sparrow-gregg-1956-slender-test",
+  name: "When a vertical cylinder is a plate",
+  serves: ["FREE.POST"],
+  result: "criterion",
+  extent: "either",
+  wall: "isothermal",
+  propertiesAt: "film",
+  length: "height",
+  lines: { limit: "35/Gr^0.25" },
+  ranges: { Gr: [1e4, 1e12] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.05, origin: "from memory" },
+  source: { work: "sparrow-gregg-1956-cylinder" },
+  confidence: "M",
+  note: "From memory. Plate equations hold within about 5 % when D/H is at least this value (Pr near 0.7 to 1). At Pr 6, the same 5 % needs less. Not a heat-transfer law.",
+};
+
+export const alArabiKhamis1982Post: Correlation = {
+  id: "al-arabi-khamis-1982-post",
+  name: "Al-Arabi & Khamis, vertical cylinder in air",
+  serves: ["FREE.POST"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "film",
+  length: "height",
+  lines: { Nu: "IF(Ra<2.6e9,2.9*Ra^0.25/GrD^(1/12),0.47*Ra^(1/3)/GrD^(1/12))" },
+  ranges: { Ra: [9.9e7, 2.95e10], GrD: [10800, 6.9e5] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "al-arabi-khamis-1982" },
+  confidence: "N",
+  note: "Air only (Pr 0.71). Ra on height, GrD on diameter. Laminar from 9.88e7 to 2.7e9, turbulent 2.7e9 to 2.95e10.",
+  symbols: { GrD: "Grashof number on the diameter" },
+};
+
+export const yang1988Post: Correlation = {
+  id: "yang-1988-post",
+  name: "Yang, vertical cylinder, all Ra",
+  serves: ["FREE.POST"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "film",
+  length: "height",
+  lines: { Nu: "(0.60*slender^0.5+0.387*(Ra/(1+(0.492/Pr)^(9/16))^(16/9))^(1/6))^2" },
+  ranges: { Ra: [1, 1e12] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "yang-1985", at: "also Wärme- und Stoffübertragung" },
+  confidence: "M",
+  note: "From memory in form and constants; reduces to Churchill & Chu-like turbulent limit. slender = height/diameter.",
+};

@@ -1,0 +1,181 @@
+/** Liquid metals in tubes, Pr below 0.1. */
+import type { Correlation } from "./correlation.js";
+
+export const lyon1951Metal: Correlation = {
+  id: "lyon-1951-metal",
+  name: "Lyon, liquid metals, uniform flux",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Pe: "Re*Pr",
+    Nu: "7+0.025*Pe^0.8",
+  },
+  ranges: { Pe: [50, 2e4], Pr: [0.002, 0.05], Re: [3600, 1e6] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "lyon-1951" },
+  confidence: "M",
+  note: "From memory. Theory without contact or oxide resistance: 20 to 30 % above most data in dirty loops.",
+};
+
+export const sebanShimazaki1951Metal: Correlation = {
+  id: "seban-shimazaki-1951-metal",
+  name: "Seban & Shimazaki, liquid metals, uniform temperature",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "isothermal",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Pe: "Re*Pr",
+    Nu: "5.0+0.025*Pe^0.8",
+  },
+  ranges: { Pe: [100, 2e4], Pr: [0.002, 0.05], Re: [3600, 1e6] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "seban-shimazaki-1951" },
+  confidence: "M",
+  note: "Constants from memory.",
+};
+
+export const skupinski1965Metal: Correlation = {
+  id: "skupinski-1965-metal",
+  name: "Skupinski, Tortel & Vautrey, NaK, uniform flux",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Pe: "Re*Pr",
+    Nu: "4.82+0.0185*Pe^0.827",
+  },
+  ranges: { Pe: [100, 1e4], Pr: [0.003, 0.05], Re: [3600, 905000] },
+  rangeOrigin: "published",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "skupinski-tortel-1965" },
+  confidence: "N",
+};
+
+export const lubarskyKaufman1955Metal: Correlation = {
+  id: "lubarsky-kaufman-1955-metal",
+  name: "Lubarsky & Kaufman, liquid metals",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Pe: "Re*Pr",
+    Nu: "0.625*Pe^0.4",
+  },
+  ranges: { Pe: [100, 1e4], Pr: [0.002, 0.05], Re: [3600, 1e6] },
+  rangeOrigin: "published",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "lubarsky-kaufman-1955" },
+  confidence: "N",
+  note: "Fit of old data with wetting and gas trouble: lower bound.",
+};
+
+export const sleicher1973MetalT: Correlation = {
+  id: "sleicher-1973-metal-T",
+  name: "Sleicher, Awad & Notter, liquid metals, uniform temperature",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "isothermal",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: { Nu: "4.8+0.0156*Re^0.85*Pr^0.93" },
+  ranges: { Re: [1e4, 1e6], Pr: [0.004, 0.1] },
+  rangeOrigin: "published",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "sleicher-1973", at: "also Notter & Sleicher 1972" },
+  confidence: "N",
+  note: "Constants agree with an independent open implementation.",
+};
+
+export const sleicher1973MetalH: Correlation = {
+  id: "sleicher-1973-metal-H",
+  name: "Sleicher, Awad & Notter, liquid metals, uniform flux",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: { Nu: "6.3+0.0167*Re^0.85*Pr^0.93" },
+  ranges: { Re: [1e4, 1e6], Pr: [0.004, 0.1] },
+  rangeOrigin: "published",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "sleicher-1973", at: "also Notter & Sleicher 1972" },
+  confidence: "N",
+};
+
+export const chenChiou1981MetalH: Correlation = {
+  id: "chen-chiou-1981-metal-H",
+  name: "Chen & Chiou, liquid metals, uniform flux",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: { Nu: "5.6+0.0165*Re^0.85*Pr^0.86" },
+  ranges: { Re: [1e4, 5e6], Pr: [0.002, 0.1] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "chen-chiou-1981" },
+  confidence: "M",
+  note: "From memory. Uniform temperature: 4.5+0.0156*Re^0.85*Pr^0.86.",
+};
+
+export const chengTak2006Metal: Correlation = {
+  id: "cheng-tak-2006-metal",
+  name: "Cheng & Tak, lead-bismuth, uniform flux",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Pe: "Re*Pr",
+    A: "IF(Pe<=1000,4.5,IF(Pe<=2000,5.4-9e-4*Pe,3.6))",
+    Nu: "A+0.018*Pe^0.8",
+  },
+  ranges: { Pe: [100, 6000], Pr: [0.01, 0.05], Re: [3000, 6e5] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "cheng-tak-2006" },
+  confidence: "M",
+  note: "Constants from memory. Continuous at both seams (4.5, 3.6).",
+};
+
+export const kirillovUshakov2001Metal: Correlation = {
+  id: "kirillov-ushakov-2001-metal",
+  name: "Kirillov & Ushakov, heavy metals",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Pe: "Re*Pr",
+    Nu: "4.5+0.018*Pe^0.8",
+  },
+  ranges: { Pe: [100, 1e4], Pr: [0.002, 0.05], Re: [3600, 1e6] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "kirillov-ushakov-2001" },
+  confidence: "M",
+  note: "Constants from memory.",
+};

@@ -1,0 +1,85 @@
+/** Fully rough plates: skin friction and heat transfer by equivalent sand roughness. */
+import type { Correlation } from "./correlation.js";
+
+export const millsHang1983RoughCfLocal: Correlation = {
+  id: "mills-hang-1983-rough-cf-local",
+  name: "Mills & Hang, fully rough skin friction, local",
+  serves: ["FORCED.PLATE"],
+  result: "friction",
+  extent: "local",
+  wall: "either",
+  propertiesAt: "film",
+  length: "x",
+  lines: { Cf: "(3.476+0.707*LN(x_ks))^(-2.46)" },
+  ranges: { x_ks: [150, 1.5e7] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.1, origin: "common practice" },
+  source: { work: "mills-hang-1983" },
+  confidence: "M",
+  note: "From memory. Auxiliary to the rough heat-transfer line. Holds for u_tau*ks/nu above 60.",
+};
+
+export const millsHang1983RoughCfMean: Correlation = {
+  id: "mills-hang-1983-rough-cf-mean",
+  name: "Mills & Hang, fully rough skin friction, mean",
+  serves: ["FORCED.PLATE"],
+  result: "friction",
+  extent: "mean",
+  wall: "either",
+  propertiesAt: "film",
+  length: "length",
+  lines: { Cf: "(2.635+0.618*LN(L_ks))^(-2.57)" },
+  ranges: { L_ks: [150, 1.5e7] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.1, origin: "common practice" },
+  source: { work: "mills-hang-1983" },
+  confidence: "M",
+  note: "From memory.",
+};
+
+export const roughPlateDippreySaberskyLocal: Correlation = {
+  id: "rough-plate-dipprey-sabersky-local",
+  name: "Fully rough plate, Dipprey & Sabersky sublayer, local",
+  serves: ["FORCED.PLATE"],
+  result: "Nu",
+  extent: "local",
+  wall: "either",
+  propertiesAt: "film",
+  length: "x",
+  lines: {
+    Cf: "(3.476+0.707*LN(x_ks))^(-2.46)",
+    ksp: "Re/x_ks*SQRT(Cf/2)",
+    St: "(Cf/2)/(0.9+SQRT(Cf/2)*(5.19*ksp^0.2*Pr^0.44-8.5))",
+    Nu: "St*Re*Pr",
+  },
+  ranges: { x_ks: [150, 1.5e7], ksp: [60, 1e5], Pr: [0.7, 6] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.25, origin: "common practice" },
+  source: { work: "dipprey-sabersky-1963", at: "on a plate as in Mills, A.F. Heat Transfer; friction of Mills & Hang 1983" },
+  confidence: "M",
+  note: "From memory. 5.19 and 8.5 are for sand grain. Never below the smooth value, and no gain beyond 3 to 4 times smooth friction. ks within the layer.",
+};
+
+export const pimenta1975RoughPlateLocal: Correlation = {
+  id: "pimenta-1975-rough-plate-local",
+  name: "Fully rough plate, Pimenta, Moffat & Kays, local",
+  serves: ["FORCED.PLATE"],
+  result: "Nu",
+  extent: "local",
+  wall: "either",
+  propertiesAt: "film",
+  length: "x",
+  lines: {
+    Cf: "(3.476+0.707*LN(x_ks))^(-2.46)",
+    ksp: "Re/x_ks*SQRT(Cf/2)",
+    Stk: "0.8/(ksp^0.2*Pr^0.44)",
+    St: "(Cf/2)/(0.9+SQRT(Cf/2)/Stk)",
+    Nu: "St*Re*Pr",
+  },
+  ranges: { x_ks: [150, 1.5e7], ksp: [60, 1e4], Pr: [0.7, 6] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.25, origin: "common practice" },
+  source: { work: "pimenta-1975", at: "also Kays & Crawford, Convective Heat and Mass Transfer" },
+  confidence: "M",
+  note: "From memory. 0.8 was set by close-packed spheres in air; sand grain lies nearby.",
+};

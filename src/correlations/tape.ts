@@ -1,0 +1,101 @@
+/** Tubes with twisted tapes or wire coils. y = pitch of half a turn / D, t_d = tape thickness / D. */
+import type { Correlation } from "./correlation.js";
+
+export const manglikBergles1993TapeLaminar: Correlation = {
+  id: "manglik-bergles-1993-tape-laminar",
+  name: "Manglik & Bergles, twisted tape, laminar, uniform temperature",
+  serves: ["DUCT.TAPE"],
+  result: "Nu",
+  extent: "mean",
+  wall: "isothermal",
+  propertiesAt: "bulk",
+  propertiesNote: "viscosity ratio with the wall's viscosity",
+  length: "inside diameter (empty tube)",
+  lines: {
+    Sw: "Re/SQRT(y)*PI()/(PI()-4*t_d)*SQRT(1+(PI()/(2*y))^2)",
+    Nu: "4.612*mub_muw^0.14*(((1+0.0951*Gz^0.894)^2.5+6.413e-9*(Sw*Pr^0.391)^3.835)^2+2.132e-14*(Re*Ra)^2.23)^0.1",
+  },
+  ranges: { Sw: [1, 2000], Pr: [3, 2000], y: [2, 6] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "manglik-bergles-1993-laminar" },
+  confidence: "N",
+  note: "y = pitch of 180 degrees / d; Re on the empty tube; Gz = m*cp/(k*L); Ra on d (0 leaves buoyancy out). Constants agree with an independent open implementation, which takes the axial Re of the partly filled tube in the buoyancy term.",
+  symbols: { Gz: "Graetz number as m*cp/(k*L)" },
+};
+
+export const manglikBergles1993TapeLaminarFriction: Correlation = {
+  id: "manglik-bergles-1993-tape-laminar-friction",
+  name: "Manglik & Bergles, twisted tape, laminar friction (Fanning, swirl based)",
+  serves: ["DUCT.TAPE"],
+  result: "friction",
+  extent: "either",
+  wall: "either",
+  propertiesAt: "bulk",
+  length: "inside diameter (empty tube)",
+  lines: {
+    Sw: "Re/SQRT(y)*PI()/(PI()-4*t_d)*SQRT(1+(PI()/(2*y))^2)",
+    fRe: "15.767*((PI()+2-2*t_d)/(PI()-4*t_d))^2*(1+1e-6*Sw^2.55)^(1/6)",
+  },
+  ranges: { Sw: [1, 2000], y: [1.5, 100] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.15, origin: "common practice" },
+  source: { work: "manglik-bergles-1993-laminar" },
+  confidence: "M",
+  note: "From memory. f and Re on the swirl speed; convert with the flow length of the spiral.",
+};
+
+export const manglikBergles1993TapeTurbulent: Correlation = {
+  id: "manglik-bergles-1993-tape-turbulent",
+  name: "Manglik & Bergles, twisted tape, turbulent",
+  serves: ["DUCT.TAPE"],
+  result: "Nu",
+  extent: "mean",
+  wall: "either",
+  propertiesAt: "bulk",
+  length: "inside diameter (empty tube)",
+  lines: { Nu: "0.023*Re^0.8*Pr^0.4*(1+0.769/y)*(PI()/(PI()-4*t_d))^0.8*((PI()+2-2*t_d)/(PI()-4*t_d))^0.2" },
+  ranges: { Re: [1e4, 1e5], Pr: [0.7, 200], y: [2, 20] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.15, origin: "common practice" },
+  source: { work: "manglik-bergles-1993-turbulent" },
+  confidence: "N",
+  note: "Property factor: liquids (mub/muw)^0.18 heating, 0.30 cooling; gases (Tb/Tw)^0.45 heating, 0.15 cooling. Constants agree with an independent open implementation.",
+};
+
+export const manglikBergles1993TapeTurbulentFriction: Correlation = {
+  id: "manglik-bergles-1993-tape-turbulent-friction",
+  name: "Manglik & Bergles, twisted tape, turbulent friction, Fanning",
+  serves: ["DUCT.TAPE"],
+  result: "friction",
+  extent: "either",
+  wall: "either",
+  propertiesAt: "bulk",
+  length: "inside diameter (empty tube)",
+  lines: { f: "0.0791/Re^0.25*(PI()/(PI()-4*t_d))^1.75*((PI()+2-2*t_d)/(PI()-4*t_d))^1.25*(1+2.752/y^1.29)" },
+  ranges: { Re: [1e4, 1e5], y: [2, 20] },
+  rangeOrigin: "customary",
+  scatter: { value: 0.1, origin: "common practice" },
+  source: { work: "manglik-bergles-1993-turbulent" },
+  confidence: "M",
+  note: "From memory. Darcy is four times this.",
+};
+
+export const garcia2005WireCoil: Correlation = {
+  id: "garcia-2005-wire-coil",
+  name: "Garcia, Vicente & Viedma, wire coil insert",
+  serves: ["DUCT.TAPE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "inside diameter",
+  lines: { Nu: "0.132/p_d^0.372*Re^0.72*Pr^0.37" },
+  ranges: { Re: [1700, 8e4], Pr: [2.8, 150], p_d: [1.17, 2.68] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.2, origin: "from memory" },
+  source: { work: "garcia-vicente-2005" },
+  confidence: "M",
+  note: "From memory. Wire 0.07 to 0.10 of d. Friction (Fanning): 5.76*(e/d)^0.95*(p/d)^-1.21*Re^-0.217.",
+  symbols: { p_d: "pitch of the wire coil / inside diameter" },
+};
