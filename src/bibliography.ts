@@ -401,6 +401,9 @@ export const bibliography = {
   "metais-eckert-1964": {
     cite: "Metais, B.; Eckert, E.R.G. J. Heat Transfer 86 (1964) 295-296",
   },
+  "millero-1978": {
+    cite: "F. J. Millero, Freezing point of sea water, in Eighth report of the joint panel on oceanographic tables and standards, UNESCO Technical Papers in Marine Science 28, 1978 (coefficients from memory)",
+  },
   "mills-hang-1983": {
     cite: "Mills, A.F.; Hang, X. J. Fluids Engineering 105 (1983) 364-365",
   },

@@ -78,7 +78,7 @@ function stateAt(liquid: LiquidDescription, T: number, p: number): State {
 
 function frozen(liquid: LiquidDescription, T: number): Problem | undefined {
   const { freezingPoint, name } = liquid;
-  if (freezingPoint === undefined || freezingPoint < liquid.T[0] || !isBelow(T, freezingPoint)) return undefined;
+  if (freezingPoint === undefined || !isBelow(T, freezingPoint)) return undefined;
   return coverageProblem(
     undefined,
     `${name} starts to freeze at ${sayTemperature(Math.round(freezingPoint * 100) / 100)}; ${sayTemperature(T)} is below it. Take a warmer state or a fluid that freezes lower.`,

@@ -6,9 +6,10 @@ import { heatTransferLiquids } from "./heat-transfer-liquids.js";
 import { liquidMetals } from "./liquid-metals.js";
 import { nearMisses } from "./near-miss.js";
 import { waterEntry } from "./records/water-entry.js";
+import { seawater } from "./seawater.js";
 import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 
-const entries: readonly ShelfEntry[] = [waterEntry, ...coolants, ...heatTransferLiquids, ...liquidMetals];
+const entries: readonly ShelfEntry[] = [waterEntry, ...coolants, seawater, ...heatTransferLiquids, ...liquidMetals];
 
 /** Every entry, in the order of the list. */
 export function shelf(): readonly ShelfEntry[] {
