@@ -250,6 +250,7 @@ export const hausen1983BankAligned: Correlation = {
   source: { work: "hausen-1983" },
   confidence: "M",
   note: "From memory. Restatement of Grimison by formula; a, b = ST/D, SL/D.",
+  symbols: { a: "transverse pitch / diameter", b: "longitudinal pitch / diameter" },
 };
 
 export const hausen1983BankStaggered: Correlation = {
@@ -271,6 +272,7 @@ export const hausen1983BankStaggered: Correlation = {
   source: { work: "hausen-1983" },
   confidence: "M",
   note: "From memory.",
+  symbols: { a: "transverse pitch / diameter", b: "longitudinal pitch / diameter" },
 };
 
 export const gnielinski1978BankAligned: Correlation = {
@@ -299,7 +301,7 @@ export const gnielinski1978BankAligned: Correlation = {
   source: { work: "gnielinski-1978", at: "also VDI Heat Atlas, sect. G7" },
   confidence: "M",
   note: "From memory. Rel and NuP are on the flow length pi*D/2, Nu on the diameter. Liquids times (Pr/Prw)^0.25 (heating) or 0.11 (cooling); gases (Tb/Tw)^0.12. Single-row part and row count are confirmed by an independent open implementation, the arrangement factor is not.",
-  symbols: { Rel: "Reynolds number on the approach speed and the flow length pi*D/2" },
+  symbols: { Rel: "Reynolds number on the approach speed and the flow length pi*D/2", a: "transverse pitch / diameter", b: "longitudinal pitch / diameter" },
 };
 
 export const gnielinski1978BankStaggered: Correlation = {
@@ -328,7 +330,7 @@ export const gnielinski1978BankStaggered: Correlation = {
   source: { work: "gnielinski-1978", at: "also VDI Heat Atlas, sect. G7" },
   confidence: "M",
   note: "From memory. Rel and NuP are on the flow length pi*D/2, Nu on the diameter. Single-row part and row count are confirmed by an independent open implementation, the arrangement factor is not.",
-  symbols: { Rel: "Reynolds number on the approach speed and the flow length pi*D/2" },
+  symbols: { Rel: "Reynolds number on the approach speed and the flow length pi*D/2", a: "transverse pitch / diameter", b: "longitudinal pitch / diameter" },
 };
 
 export const gaddisGnielinski1985DpAligned: Correlation = {
@@ -351,6 +353,7 @@ export const gaddisGnielinski1985DpAligned: Correlation = {
   source: { work: "gaddis-gnielinski-1985", at: "also VDI Heat Atlas, sect. L1.4" },
   confidence: "N",
   note: "w in the narrowest gap. 5 to 9 rows: add (1/rows-1/10)/a^2 before the bracket. Viscosity factors (muw/mu)^0.14 turbulent, (muw/mu)^(0.57/(((4ab/pi)-1)*Re)^0.25) laminar.",
+  symbols: { a: "transverse pitch / diameter", b: "longitudinal pitch / diameter", xi: "pressure-loss coefficient of one row" },
 };
 
 export const gaddisGnielinski1985DpStaggered: Correlation = {
@@ -375,6 +378,7 @@ export const gaddisGnielinski1985DpStaggered: Correlation = {
   source: { work: "gaddis-gnielinski-1985", at: "also VDI Heat Atlas, sect. L1.4" },
   confidence: "N",
   note: "w in the narrowest gap; when b < 0.5*sqrt(2a+1) that is the diagonal.",
+  symbols: { a: "transverse pitch / diameter", b: "longitudinal pitch / diameter", xi: "pressure-loss coefficient of one row" },
 };
 
 export const zukauskas1988EulerStaggered: Correlation = {
@@ -398,4 +402,5 @@ export const zukauskas1988EulerStaggered: Correlation = {
   source: { work: "zukauskas-ulinskas-1988" },
   confidence: "N",
   note: "Constants confirmed, range from memory. b = 1.25 or 1.5 exactly (equilateral, k1 = 1); other pitch ratios need the factor k1 (a/b). Prefer Gaddis & Gnielinski.",
+  symbols: { b: "pitch / diameter" },
 };

@@ -17,6 +17,7 @@ export const stephan1962AnnulusInner: Correlation = {
   source: { work: "stephan-1962", at: "also VDI Heat Atlas, sect. G2" },
   confidence: "N",
   note: "a = Di/Do.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const stephan1962AnnulusOuter: Correlation = {
@@ -35,6 +36,7 @@ export const stephan1962AnnulusOuter: Correlation = {
   source: { work: "stephan-1962", at: "also VDI Heat Atlas, sect. G2" },
   confidence: "N",
   note: "a = Di/Do.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const stephan1962AnnulusBoth: Correlation = {
@@ -53,6 +55,7 @@ export const stephan1962AnnulusBoth: Correlation = {
   source: { work: "stephan-1962", at: "also VDI Heat Atlas, sect. G2" },
   confidence: "N",
   note: "a = Di/Do. Thin cores: 13 % low at a = 0.02 against the exact solution, so the range starts at 0.04 here (published from 0).",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const tableAnnulusNuIi: Correlation = {
@@ -87,6 +90,7 @@ export const tableAnnulusNuIi: Correlation = {
   source: { work: "lundberg-1963", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Heat flux on both walls by superposition with the influence coefficients. Linear between rows, which were recomputed from the governing equations; coarse below a = 0.1.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const tableAnnulusNuOo: Correlation = {
@@ -121,6 +125,7 @@ export const tableAnnulusNuOo: Correlation = {
   source: { work: "lundberg-1963", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Heat flux on both walls by superposition with the influence coefficients. Linear between rows, which were recomputed from the governing equations; coarse below a = 0.1.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const tableAnnulusFRe: Correlation = {
@@ -155,6 +160,7 @@ export const tableAnnulusFRe: Correlation = {
   source: { work: "lundberg-1963", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Linear between rows, which were recomputed from the governing equations; coarse below a = 0.1. Darcy friction is four times Fanning.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const petukhovRoizen1964Inner: Correlation = {
@@ -173,6 +179,7 @@ export const petukhovRoizen1964Inner: Correlation = {
   source: { work: "petukhov-roizen-1964" },
   confidence: "M",
   note: "From memory. Factor on the tube Nu at the hydraulic diameter; a = Di/Do.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const petukhovRoizen1964Outer: Correlation = {
@@ -191,6 +198,7 @@ export const petukhovRoizen1964Outer: Correlation = {
   source: { work: "petukhov-roizen-1964" },
   confidence: "M",
   note: "From memory. Factor on the tube Nu at the hydraulic diameter; a = Di/Do.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const petukhovRoizenBoth: Correlation = {
@@ -209,6 +217,7 @@ export const petukhovRoizenBoth: Correlation = {
   source: { work: "stephan-1962", at: "also VDI Heat Atlas, sect. G2" },
   confidence: "M",
   note: "From memory. Factor on the tube Nu at the hydraulic diameter; a = Di/Do.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const gnielinski2009AnnulusInner: Correlation = {
@@ -233,6 +242,7 @@ export const gnielinski2009AnnulusInner: Correlation = {
   source: { work: "gnielinski-2009" },
   confidence: "N",
   note: "a = Di/Do. Liquids times (Pr/Prw)^0.11, heated gases (Tb/Tw)^0.45. Re*, k1 and both wall factors agree with an independent open implementation.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const gnielinski2009AnnulusOuter: Correlation = {
@@ -257,6 +267,7 @@ export const gnielinski2009AnnulusOuter: Correlation = {
   source: { work: "gnielinski-2009" },
   confidence: "N",
   note: "a = Di/Do. Liquids times (Pr/Prw)^0.11, heated gases (Tb/Tw)^0.45. Re*, k1 and both wall factors agree with an independent open implementation.",
+  symbols: { a: "inner / outer diameter" },
 };
 
 export const gnielinski2009AnnulusBoth: Correlation = {
@@ -281,4 +292,5 @@ export const gnielinski2009AnnulusBoth: Correlation = {
   source: { work: "gnielinski-2009" },
   confidence: "M",
   note: "From memory. a = Di/Do. Liquids times (Pr/Prw)^0.11, heated gases (Tb/Tw)^0.45. Re*, k1 and both wall factors agree with an independent open implementation; that one weights both walls as (F1+F2)/(1+a), which is no area mean: here a*F1.",
+  symbols: { a: "inner / outer diameter" },
 };

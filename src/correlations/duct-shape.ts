@@ -122,6 +122,7 @@ export const shahLondonRectangleFRe: Correlation = {
   source: { work: "shah-london-1978" },
   confidence: "N",
   note: "Polynomial of the published table, a = short/long side.",
+  symbols: { a: "short side / long side" },
 };
 
 export const shahLondonRectangleNuT: Correlation = {
@@ -140,6 +141,7 @@ export const shahLondonRectangleNuT: Correlation = {
   source: { work: "shah-london-1978" },
   confidence: "N",
   note: "Polynomial of the published table, a = short/long side.",
+  symbols: { a: "short side / long side" },
 };
 
 export const shahLondonRectangleNuH1: Correlation = {
@@ -158,6 +160,7 @@ export const shahLondonRectangleNuH1: Correlation = {
   source: { work: "shah-london-1978" },
   confidence: "N",
   note: "Polynomial of the published table, a = short/long side.",
+  symbols: { a: "short side / long side" },
 };
 
 export const tableRectangleNuT: Correlation = {
@@ -195,6 +198,7 @@ export const tableRectangleNuT: Correlation = {
   source: { work: "shah-london-1978", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Linear between rows, which were recomputed from the governing equations.",
+  symbols: { a: "short side / long side" },
 };
 
 export const tableTriangleNuT: Correlation = {
@@ -297,6 +301,7 @@ export const tableRectangleNuH1: Correlation = {
   source: { work: "shah-london-1978", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Linear between rows, which were recomputed from the governing equations.",
+  symbols: { a: "short side / long side" },
 };
 
 export const tableTriangleNuH1: Correlation = {
@@ -398,6 +403,7 @@ export const tableRectangleNuH2: Correlation = {
   source: { work: "shah-london-1978", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Linear between rows, which were recomputed from the governing equations.",
+  symbols: { a: "short side / long side" },
 };
 
 export const tableTriangleNuH2: Correlation = {
@@ -500,6 +506,7 @@ export const tableRectangleFRe: Correlation = {
   source: { work: "shah-london-1978", at: "recomputed from the governing equations" },
   confidence: "N",
   note: "Linear between rows, which were recomputed from the governing equations. Darcy friction is four times Fanning.",
+  symbols: { a: "short side / long side" },
 };
 
 export const tableTriangleFRe: Correlation = {
@@ -584,7 +591,6 @@ export const shah1975PlatesTLocal: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "Seam at xs = 0.001.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const shah1975PlatesTMean: Correlation = {
@@ -602,7 +608,6 @@ export const shah1975PlatesTMean: Correlation = {
   scatter: { value: 0.05, origin: "common practice" },
   source: { work: "shah-1975" },
   confidence: "N",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const shah1975PlatesHLocal: Correlation = {
@@ -621,7 +626,6 @@ export const shah1975PlatesHLocal: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "The middle piece is printed with -0.4 in several books: against the exact solution -0.4 is 4 % low and jumps 7 % at 0.001, +0.4 is within 0.5 %. Taken as +0.4.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const shah1975PlatesHMean: Correlation = {
@@ -640,7 +644,6 @@ export const shah1975PlatesHMean: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "The average of the local Nu, not q over the mean difference.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const stephan1959PlatesTMean: Correlation = {
@@ -658,7 +661,6 @@ export const stephan1959PlatesTMean: Correlation = {
   scatter: { value: 0.1, origin: "common practice" },
   source: { work: "stephan-1959" },
   confidence: "N",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const jones1976RectangleTurbulent: Correlation = {
@@ -677,4 +679,5 @@ export const jones1976RectangleTurbulent: Correlation = {
   source: { work: "jones-1976" },
   confidence: "N",
   note: "Laminar-equivalent over hydraulic diameter: use Factor*Re in the tube friction law; the same in Gnielinski's equation gives Nu on Dh. a = short side / long side.",
+  symbols: { a: "short side / long side" },
 };

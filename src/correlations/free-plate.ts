@@ -258,7 +258,6 @@ export const raithbyHollands1998PlateFlux: Correlation = {
   source: { work: "raithby-hollands-1998" },
   confidence: "N",
   note: "Verified by its two limits: the laminar part is the exact layer within 0.3 % (6/5 turns the local value at L into q over the mean difference), and with RaStar = Ra*Nu the turbulent part is the isothermal one at the same Ra, where h no longer depends on L. The exponent 6 of the blend and 1.8 are from memory; without a damper on the turbulent part the blend lies 5 to 9 % over the exact layer at RaStar 1e9 to 1e10 and 15 % at 1e11 in air.",
-  symbols: { RaStar: "modified Rayleigh number, Ra*Nu" },
 };
 
 export const churchillChu1975PlateFluxAll: Correlation = {

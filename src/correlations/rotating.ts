@@ -196,13 +196,12 @@ export const taylorCouetteOnset: Correlation = {
   propertiesNote: "mean of the two walls",
   length: "gap",
   lines: { Tac: "1695" },
-  ranges: { eta: [0.9, 1] },
+  ranges: {  },
   rangeOrigin: "customary",
   scatter: { value: 0.05, origin: "common practice" },
   source: { work: "taylor-1923" },
   confidence: "N",
-  note: "Ta = omega^2*Ri*gap^3/nu^2, narrow gap, outer at rest. Wider gaps: higher.",
-  symbols: { eta: "inner over outer radius" },
+  note: "Ta = omega^2*Ri*gap^3/nu^2 with the inner radius Ri, narrow gap, outer at rest. Wider gaps: higher.",
 };
 
 export const beckerKaye1962Gap: Correlation = {

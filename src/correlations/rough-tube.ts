@@ -20,7 +20,6 @@ export const norris1971Rough: Correlation = {
   source: { work: "norris-1971" },
   confidence: "M",
   note: "From memory. n = 1 above Pr 6; no further gain above f/fs of 4.",
-  symbols: { f_fs: "rough over smooth friction" },
 };
 
 export const bhattiShah1987Rough: Correlation = {

@@ -34,7 +34,6 @@ export const shahLondonFappTube: Correlation = {
   source: { work: "shah-1978" },
   confidence: "N",
   note: "Pressure drop includes the momentum change.",
-  symbols: { xp: "x/(D*Re)" },
 };
 
 export const blasius1913Friction: Correlation = {

@@ -53,7 +53,6 @@ export const shah1975TubeTLocal: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "Seam at xs = 0.001. Some books print 0.01 as the limit of the first piece: then it is 13 % low at 0.01 against the exact 4.92.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const shah1975TubeTMean: Correlation = {
@@ -72,7 +71,6 @@ export const shah1975TubeTMean: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "Steps of up to 4 % at the seams are in the source.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const shah1975TubeHLocal: Correlation = {
@@ -91,7 +89,6 @@ export const shah1975TubeHLocal: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "Seams at xs = 0.00005 and 0.0015.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const shah1975TubeHMean: Correlation = {
@@ -110,7 +107,6 @@ export const shah1975TubeHMean: Correlation = {
   source: { work: "shah-1975" },
   confidence: "N",
   note: "The average of the local Nu, not q over the mean difference, which is up to 11 % lower in the exact solution.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const hausen1943TubeTMean: Correlation = {
@@ -132,7 +128,6 @@ export const hausen1943TubeTMean: Correlation = {
   source: { work: "hausen-1943" },
   confidence: "N",
   note: "Up to 12 % above the exact Graetz mean near Gz 100 (pure thermal entry).",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const siederTate1936Laminar: Correlation = {
@@ -177,7 +172,6 @@ export const gnielinskiTubeTMeanThermal: Correlation = {
   source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
   confidence: "N",
   note: "Hydrodynamically developed. Valid over all Gz; closest simple mean.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const gnielinskiTubeTMeanSimultaneous: Correlation = {
@@ -201,7 +195,6 @@ export const gnielinskiTubeTMeanSimultaneous: Correlation = {
   source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
   confidence: "N",
   note: "Combined entry within 9 % of the exact solution.",
-  symbols: { D_L: "diameter / length" },
 };
 
 export const gnielinskiTubeHLocal: Correlation = {
@@ -223,7 +216,6 @@ export const gnielinskiTubeHLocal: Correlation = {
   source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
   confidence: "N",
   note: "Developed laminar velocity. Within 4 % of the exact solution.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const gnielinskiTubeHMean: Correlation = {
@@ -246,7 +238,6 @@ export const gnielinskiTubeHMean: Correlation = {
   source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
   confidence: "N",
   note: "The length average of the local Nu, as its Lévêque constant says (1.953 = 1.302*3/2). It is not q over the mean difference, which is up to 11 % lower.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const gnielinskiTubeHMeanSimultaneous: Correlation = {
@@ -270,7 +261,6 @@ export const gnielinskiTubeHMeanSimultaneous: Correlation = {
   source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
   confidence: "M",
   note: "Constants from memory. The length average of the local Nu, not q over the mean difference.",
-  symbols: { D_L: "diameter / length" },
 };
 
 export const churchillOzoe1973TubeHLocal: Correlation = {
@@ -294,7 +284,6 @@ export const churchillOzoe1973TubeHLocal: Correlation = {
   source: { work: "churchill-ozoe-1973-forced" },
   confidence: "N",
   note: "Reduces to thermal entry at high Pr.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const stephan1959TubeTMean: Correlation = {
@@ -313,7 +302,6 @@ export const stephan1959TubeTMean: Correlation = {
   source: { work: "stephan-1959" },
   confidence: "N",
   note: "Denominator holds Pr*(Re*D/L)^0.83, not (Re*Pr*D/L)^0.83.",
-  symbols: { D_L: "diameter / length" },
 };
 
 export const baehrStephanTubeTMean: Correlation = {
@@ -335,7 +323,6 @@ export const baehrStephanTubeTMean: Correlation = {
   source: { work: "baehr-stephan", at: "eqs. 3.250 and 3.255" },
   confidence: "N",
   note: "Thermal entry alone: Nuth. Closest smooth line for simultaneous entry.",
-  symbols: { xs: "x/(D*Re*Pr)" },
 };
 
 export const gnielinskiTubeTLocal: Correlation = {

@@ -161,14 +161,14 @@ export const gnielinski2013Tube: Correlation = {
   note: "Property factor apart. VDI Heat Atlas: (f/8)*Re instead of (Re-1000) above 1e4, within 1 % at 1e5.",
 };
 
-export const gnielinski2013Transition: Correlation = {
-  id: "gnielinski-2013-transition",
-  name: "Gnielinski 2013, transition 2300 to 4000 by interpolation",
+export const gnielinski2013TransitionT: Correlation = {
+  id: "gnielinski-2013-transition-T",
+  name: "Gnielinski 2013, transition 2300 to 4000 by interpolation, uniform temperature",
   serves: ["DUCT.TUBE"],
   set: "Gnielinski 2013",
   result: "Nu",
   extent: "mean",
-  wall: "either",
+  wall: "isothermal",
   propertiesAt: "bulk",
   length: "diameter",
   lines: {
@@ -176,7 +176,33 @@ export const gnielinski2013Transition: Correlation = {
     f: "(1.8*LOG10(4000)-1.5)^(-2)",
     Nut: "(f/8)*3000*Pr/(1+12.7*SQRT(f/8)*(Pr^(2/3)-1))*(1+D_L^(2/3))",
     Gz: "2300*Pr*D_L",
-    Nul: "IF(flux=1,(4.364^3+0.6^3+(1.953*Gz^(1/3)-0.6)^3+(0.924*Pr^(1/3)*(2300*D_L)^0.5)^3)^(1/3),(3.66^3+0.7^3+(1.615*Gz^(1/3)-0.7)^3+((2/(1+22*Pr))^(1/6)*Gz^0.5)^3)^(1/3))",
+    Nul: "(3.66^3+0.7^3+(1.615*Gz^(1/3)-0.7)^3+((2/(1+22*Pr))^(1/6)*Gz^0.5)^3)^(1/3)",
+    Nu: "(1-gamma)*Nul+gamma*Nut",
+  },
+  ranges: { Re: [2300, 4000], Pr: [0.1, 1000], D_L: [1e-4, 1] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.25, origin: "common practice" },
+  source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
+  confidence: "M",
+  note: "From memory. Linear between the laminar value at 2300 and the turbulent value at 4000; the 1995 version ran to 1e4.",
+};
+
+export const gnielinski2013TransitionH: Correlation = {
+  id: "gnielinski-2013-transition-H",
+  name: "Gnielinski 2013, transition 2300 to 4000 by interpolation, uniform flux",
+  serves: ["DUCT.TUBE"],
+  set: "Gnielinski 2013",
+  result: "Nu",
+  extent: "mean",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    gamma: "(Re-2300)/(4000-2300)",
+    f: "(1.8*LOG10(4000)-1.5)^(-2)",
+    Nut: "(f/8)*3000*Pr/(1+12.7*SQRT(f/8)*(Pr^(2/3)-1))*(1+D_L^(2/3))",
+    Gz: "2300*Pr*D_L",
+    Nul: "(4.364^3+0.6^3+(1.953*Gz^(1/3)-0.6)^3+(0.924*Pr^(1/3)*(2300*D_L)^0.5)^3)^(1/3)",
     Nu: "(1-gamma)*Nul+gamma*Nut",
   },
   ranges: { Re: [2300, 4000], Pr: [0.1, 1000], D_L: [1e-4, 1] },
@@ -226,18 +252,42 @@ export const hausen1959Turbulent: Correlation = {
   confidence: "N",
 };
 
-export const churchill1977AllRegimes: Correlation = {
-  id: "churchill-1977-all-regimes",
-  name: "Churchill, all regimes in one line",
+export const churchill1977AllRegimesT: Correlation = {
+  id: "churchill-1977-all-regimes-T",
+  name: "Churchill, all regimes in one line, uniform temperature",
   serves: ["DUCT.TUBE"],
   result: "Nu",
   extent: "either",
-  wall: "either",
+  wall: "isothermal",
   propertiesAt: "bulk",
   length: "diameter",
   lines: {
-    Nul: "IF(flux=1,4.364,3.657)",
-    Nu0: "IF(flux=1,6.3,4.8)",
+    Nul: "3.657",
+    Nu0: "4.8",
+    f: "8*((8/Re)^12+1/((2.457*LN((Re/7)^0.9))^16+(37530/Re)^16)^1.5)^(1/12)",
+    Nut: "Nu0+0.079*Re*SQRT(f/8)*Pr/(1+Pr^0.8)^(5/6)",
+    Nu: "(Nul^10+(EXP((2200-Re)/365)/Nul^2+1/Nut^2)^(-5))^(1/10)",
+  },
+  ranges: { Re: [10, 1e6], Pr: [0.001, 1000] },
+  rangeOrigin: "from memory",
+  scatter: { value: 0.2, origin: "common practice" },
+  source: { work: "churchill-1977-tube" },
+  confidence: "M",
+  note: "From memory. f is Darcy (the paper uses f/8), smooth.",
+};
+
+export const churchill1977AllRegimesH: Correlation = {
+  id: "churchill-1977-all-regimes-H",
+  name: "Churchill, all regimes in one line, uniform flux",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "either",
+  wall: "uniform flux",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    Nul: "4.364",
+    Nu0: "6.3",
     f: "8*((8/Re)^12+1/((2.457*LN((Re/7)^0.9))^16+(37530/Re)^16)^1.5)^(1/12)",
     Nut: "Nu0+0.079*Re*SQRT(f/8)*Pr/(1+Pr^0.8)^(5/6)",
     Nu: "(Nul^10+(EXP((2200-Re)/365)/Nul^2+1/Nut^2)^(-5))^(1/10)",
