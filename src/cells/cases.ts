@@ -60,3 +60,8 @@ export function cellAt(block: CellBlock, row: number, column: number): unknown {
 export function isSingle(block: CellBlock): boolean {
   return block.length === 1 && block[0]?.length === 1;
 }
+
+/** The name under which a wrapper passes an argument: "longitudinal pitch" comes as longitudinalPitch. */
+export function keyOfName(name: string): string {
+  return name.replace(/ (\w)/g, (_, letter: string) => letter.toUpperCase());
+}

@@ -17,3 +17,11 @@ export type CellBlock = readonly (readonly unknown[])[];
 export function isErrorCell(cell: unknown): cell is { readonly code: string; readonly message?: string } {
   return typeof cell === "object" && cell !== null && typeof (cell as { code?: unknown }).code === "string";
 }
+
+/** What a cell holds, as messages quote it. */
+export function quoted(cell: unknown): string {
+  if (isErrorCell(cell)) return `the error ${cell.code}`;
+  if (typeof cell === "boolean") return cell ? "TRUE" : "FALSE";
+  if (typeof cell === "number" && !Number.isFinite(cell)) return "a number without value";
+  return typeof cell === "object" ? "an object" : JSON.stringify(cell);
+}

@@ -5,7 +5,7 @@ import { surfaceById } from "../surfaces/index.js";
 import type { Inputs, Surface } from "../surfaces/surface.js";
 import { type Arguments, answer } from "./answer.js";
 import { type CellBlock, CellError } from "./cell.js";
-import { cellAt } from "./cases.js";
+import { cellAt, keyOfName } from "./cases.js";
 import type { Explanation, InputShown } from "./explanation.js";
 import { argumentNames, openSurfaceCall, type SurfaceCall } from "./surface-call.js";
 import { isWanted } from "./request.js";
@@ -76,10 +76,9 @@ function placeOf(call: SurfaceCall, at: { readonly row: number; readonly column:
 }
 
 function inputsGiven(surface: Surface, args: Arguments, row = 0, column = 0): readonly InputShown[] {
-  const keys = ["fluid", surface.wallName, "bulk", ...surface.arguments.map((one) => one.key)];
   const describes = ["name of the fluid, or a property table", "temperature or heat flux", "bulk temperature", ...surface.arguments.map((one) => one.describe)];
   return argumentNames(surface).map((name, i) => {
-    const block = args[keys[i] as string];
+    const block = args[keyOfName(name)];
     const cell = block === null || block === undefined ? "" : i === 0 && block.length > 1 ? "property table" : cellAt(block, row, column);
     return { name, given: shown(cell), read: "", describe: describes[i] as string };
   });

@@ -5,7 +5,7 @@ import { isProblem, type Problem, valueProblem } from "../quantities/problems.js
 import type { Dimension, Quantity, Reading } from "../quantities/quantity.js";
 import { readQuantity } from "../quantities/reading.js";
 import type { ArgumentDefinition, FlowKind, Inputs, Surface, Tolerance, Wall } from "../surfaces/surface.js";
-import { type CellBlock, isErrorCell } from "./cell.js";
+import { type CellBlock, isErrorCell, quoted } from "./cell.js";
 import { isBlank, isBlankOrZero } from "./cases.js";
 import type { Settled } from "./settings.js";
 
@@ -41,7 +41,7 @@ export function readFluid(block: CellBlock, reading: Reading): Fluid | readonly 
 
 export function fluidByName(cell: unknown): Fluid | Problem {
   if (typeof cell !== "string") {
-    return valueProblem("fluid", `${String(cell)} is not the name of a fluid; write a name such as "air", or give a property table.`);
+    return valueProblem("fluid", `${quoted(cell)} is not the name of a fluid; write a name such as "air", or give a property table.`);
   }
   const found = findFluid(cell);
   return isProblem(found) && found.argument === undefined ? { ...found, argument: "fluid" } : found;
@@ -114,7 +114,8 @@ export function readCase(surface: Surface, raw: RawCase, fluid: Fluid | readonly
     remarks,
     tolerances,
   };
-  return { kind: "inputs", inputs };
+  const unfit = surface.check?.(inputs);
+  return unfit === undefined ? { kind: "inputs", inputs } : { kind: "problems", problems: [unfit] };
 }
 
 /** All its broadcast cells blank or 0, or a blank or 0 where zero is impossible: tables can be longer than their data. */
@@ -126,7 +127,7 @@ function isBlankCase(surface: Surface, raw: RawCase): boolean {
 
 export function readCell(cell: unknown, dimensions: readonly Dimension[], name: string, settled: Settled): Quantity | Problem {
   if (typeof cell !== "number" && typeof cell !== "string") {
-    return valueProblem(name, `${typeof cell === "boolean" ? String(cell).toUpperCase() : "this"} is not a quantity; write a number, or text with its unit.`);
+    return valueProblem(name, `${quoted(cell)} is not a quantity; write a number, or text with its unit.`);
   }
   const unit = settled.units.size === 0 ? undefined : settled.units.get(name.toLowerCase());
   return readQuantity(cell, dimensions, unit === undefined ? settled.reading : { ...settled.reading, unit }, name);
@@ -134,10 +135,10 @@ export function readCell(cell: unknown, dimensions: readonly Dimension[], name: 
 
 function wrongSign(argument: ArgumentDefinition, quantity: Quantity): Problem | undefined {
   if (argument.sign === "positive" && !(quantity.value > 0)) {
-    return valueProblem(argument.name, `${JSON.stringify(quantity.given)} is not above zero; ${argument.describe}.`);
+    return valueProblem(argument.name, `${quoted(quantity.given)} is not above zero; ${argument.describe}.`);
   }
   if (argument.sign === "not negative" && quantity.value < 0) {
-    return valueProblem(argument.name, `${JSON.stringify(quantity.given)} is below zero; ${argument.describe}.`);
+    return valueProblem(argument.name, `${quoted(quantity.given)} is below zero; ${argument.describe}.`);
   }
   return undefined;
 }

@@ -7,7 +7,7 @@ import { valueProblem } from "../quantities/problems.js";
 import { unitNames } from "../quantities/units.js";
 import { allSurfaces } from "../surfaces/index.js";
 import { commonSettings } from "../surfaces/settings.js";
-import type { CellBlock, CellValue } from "./cell.js";
+import { type CellBlock, CellError, type CellValue, isErrorCell, quoted } from "./cell.js";
 import { isBlankOrZero } from "./cases.js";
 import { fluidWords, rangeText } from "./fluid-function.js";
 import { errorOf } from "./render.js";
@@ -90,14 +90,16 @@ function choices(words: readonly string[] | undefined): string {
 
 /** FILM.LIST: a table of what there is, narrowed by words that must all occur in a row. */
 export function answerList(what: CellBlock | null | undefined, filter: CellBlock | null | undefined): CellValue[][] {
-  const name = String(what?.[0]?.[0] ?? "").trim().toLowerCase();
+  const asked = what?.[0]?.[0];
+  if (isErrorCell(asked)) return [[new CellError(asked.code as CellError["code"], asked.message ?? "")]];
+  const name = typeof asked === "string" ? asked.trim().toLowerCase() : "";
   const list = lists[name];
   if (list === undefined) {
     const known = Object.keys(lists).map((one) => `"${one}"`).join(", ");
-    return [[errorOf(valueProblem("what", `"${name}" is not a list; write one of ${known}.`))]];
+    return [[errorOf(valueProblem("what", `${isBlankOrZero(asked) ? "nothing" : quoted(asked)} is not a list; write one of ${known}.`))]];
   }
   const { head, rows } = list();
-  const wanted = isBlankOrZero(filter?.[0]?.[0]) ? [] : String(filter?.[0]?.[0]).toLowerCase().split(/\s+/);
+  const wanted = typeof filter?.[0]?.[0] !== "string" ? [] : filter[0][0].trim().toLowerCase().split(/\s+/);
   const kept = rows.filter((row) => {
     const text = row.join(" ").toLowerCase();
     return wanted.every((word) => text.includes(word));

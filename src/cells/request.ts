@@ -1,7 +1,7 @@
 import type { WordEntry } from "../findings/words.js";
 import { type Problem, isProblem, valueProblem } from "../quantities/problems.js";
 import { findUnit, type Unit } from "../quantities/units.js";
-import type { CellBlock } from "./cell.js";
+import { type CellBlock, quoted } from "./cell.js";
 import { isBlank, sizeOf } from "./cases.js";
 
 /** One word of `give`, with the unit its brackets ask for; undefined where the header cell is blank. */
@@ -29,7 +29,8 @@ export function readRequest(give: CellBlock | null | undefined, words: readonly 
 
 function readWord(cell: unknown, words: readonly WordEntry[]): Wanted | Problem | undefined {
   if (isBlank(cell) || cell === 0) return undefined;
-  const text = String(cell).replace(/\s+/g, " ").trim();
+  if (typeof cell !== "string") return valueProblem("give", `holds ${quoted(cell)}; a word is needed, such as "h" or "verdict".`);
+  const text = cell.replace(/\s+/g, " ").trim();
   const exact = lookUp(text, words);
   if (exact !== undefined) return { word: exact };
   const bracketed = /^(.*?)\s*[[(](.*)[\])]$/.exec(text);

@@ -6,7 +6,7 @@ import { formatNumber } from "../quantities/format.js";
 import { standardPressure } from "../surfaces/atmosphere.js";
 import type { SettingDefinition, Tolerance } from "../surfaces/surface.js";
 import type { CellBlock } from "./cell.js";
-import { isErrorCell } from "./cell.js";
+import { isErrorCell, quoted } from "./cell.js";
 import { isBlank, isOmitted, sizeOf } from "./cases.js";
 
 const standardGravity = 9.80665;
@@ -30,13 +30,9 @@ export function readSettings(block: CellBlock | null | undefined, known: readonl
   if (headed) return fromTable(cells, known);
   if (columns === 2) return fromList(cells, known);
   if (rows === 1 || columns === 1) {
-    return fromText(
-      cells
-        .flat()
-        .filter((cell) => !isBlank(cell))
-        .join(";"),
-      known,
-    );
+    const pieces = cells.flat().filter((cell) => !isBlank(cell));
+    const odd = pieces.find((cell) => typeof cell !== "string");
+    return odd === undefined ? fromText(pieces.join(";"), known) : fromText(odd, known);
   }
   return valueProblem(
     "settings",
@@ -45,7 +41,7 @@ export function readSettings(block: CellBlock | null | undefined, known: readonl
 }
 
 function nameOf(cell: unknown): string {
-  return String(cell).replace(/\s+/g, " ").trim().toLowerCase();
+  return (typeof cell === "string" ? cell : quoted(cell)).replace(/\s+/g, " ").trim().toLowerCase();
 }
 
 function isKnown(name: string, known: readonly SettingDefinition[]): boolean {
@@ -58,7 +54,7 @@ function unknownName(name: string, known: readonly SettingDefinition[]): Problem
 
 function fromText(cell: unknown, known: readonly SettingDefinition[]): RawSettings | Problem {
   if (typeof cell !== "string") {
-    return valueProblem("settings", `${String(cell)} is not a setting; write text such as "pressure=2 bar; emissivity=0.9".`);
+    return valueProblem("settings", `${quoted(cell)} is not a setting; write text such as "pressure=2 bar; emissivity=0.9".`);
   }
   const map = new Map<string, unknown>();
   for (const piece of cell.split(/[;\n]/)) {
@@ -222,7 +218,7 @@ function takeWord(definition: SettingDefinition, value: unknown): string | Probl
   const text = String(value).replace(/\s+/g, " ").trim().toLowerCase();
   const found = definition.words?.find((word) => word.toLowerCase() === text);
   if (found !== undefined) return found;
-  return valueProblem(definition.name, `"${String(value)}" is not known; write ${(definition.words ?? []).map((word) => `"${word}"`).join(" or ")}.`);
+  return valueProblem(definition.name, `${quoted(value)} is not known; write ${(definition.words ?? []).map((word) => `"${word}"`).join(" or ")}.`);
 }
 
 function takeQuantity(
@@ -238,12 +234,12 @@ function takeQuantity(
   if (definition === undefined) return undefined;
   const value = raw.get(definition.name.toLowerCase());
   if (value === undefined || isErrorCell(value)) return undefined;
-  if (typeof value === "boolean") {
-    problems.push(valueProblem(definition.name, `${String(value).toUpperCase()} is not a quantity.`));
+  if (typeof value !== "number" && typeof value !== "string") {
+    problems.push(valueProblem(definition.name, `${quoted(value)} is not a quantity.`));
     return undefined;
   }
   const unit = units.get(definition.name.toLowerCase());
-  const read = readQuantity(value as string | number, definition.dimensions ?? ["none"], unit === undefined ? reading : { ...reading, unit }, definition.name);
+  const read = readQuantity(value, definition.dimensions ?? ["none"], unit === undefined ? reading : { ...reading, unit }, definition.name);
   const checked = isProblem(read) ? read : withinLimits(definition, read);
   if (isProblem(checked)) {
     problems.push(checked);
@@ -256,7 +252,7 @@ function takeQuantity(
 function withinLimits(definition: SettingDefinition, quantity: Quantity): Quantity | Problem {
   const value = inDegrees(quantity);
   const { sign, low, high } = definition;
-  const given = JSON.stringify(quantity.given);
+  const given = quoted(quantity.given);
   if (sign === "positive" && !(value > 0)) return valueProblem(definition.name, `${given} is not above zero.`);
   if (sign === "not negative" && value < 0) return valueProblem(definition.name, `${given} is below zero.`);
   if ((low !== undefined && value < low) || (high !== undefined && value > high)) {

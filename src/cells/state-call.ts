@@ -8,8 +8,8 @@ import { defaultUnit } from "../quantities/units.js";
 import { commonSettings } from "../surfaces/settings.js";
 import type { ArgumentDefinition } from "../surfaces/surface.js";
 import type { Arguments } from "./answer.js";
-import { cellAt, type Cases, isBlank, isBlankOrZero, isSingle, shapeOf } from "./cases.js";
-import { type CellBlock, CellError, type CellValue, isErrorCell } from "./cell.js";
+import { cellAt, type Cases, isBlank, isBlankOrZero, isSingle, keyOfName, shapeOf } from "./cases.js";
+import { type CellBlock, CellError, type CellValue, isErrorCell, quoted } from "./cell.js";
 import { fluidWord, fluidWords } from "./fluid-function.js";
 import { fluidByName, isOwnTable, readCell, readFluid } from "./inputs.js";
 import { layOut, problemCells, problemsEverywhere, unanswered } from "./layout.js";
@@ -74,8 +74,8 @@ function answerDefinition(
   const raw = readSettings(settings, commonSettings);
   if (isProblem(raw)) problems.push(raw);
   if (isProblem(request)) problems.push(request);
-  const names = [...(definition.takesFluid ? [{ key: "fluid", name: "fluid" }] : []), ...definition.arguments];
-  const blocks = names.map(({ key, name }) => ({ name, block: args[key] ?? undefined }));
+  const names = [...(definition.takesFluid ? [{ name: "fluid" }] : []), ...definition.arguments];
+  const blocks = names.map(({ name }) => ({ name, block: args[keyOfName(name)] ?? undefined }));
   for (const one of blocks) if (one.block === undefined) problems.push(valueProblem(one.name, "is missing; this argument must be there."));
   if (problems.length > 0) return problemsEverywhere(problems, request);
 
@@ -163,7 +163,7 @@ function readState(
     if (argument.dimensions[0] === "temperature" && isBlankOrZero(cell)) remarks.push(`${argument.name}: ${zeroTaken}`);
     const quantity = readCell(isBlank(cell) ? 0 : cell, argument.dimensions, argument.name, settled);
     if (isProblem(quantity)) problems.push(quantity);
-    else if (argument.sign !== "any" && quantity.value < 0) problems.push(valueProblem(argument.name, `${JSON.stringify(quantity.given)} is below zero; ${argument.describe}.`));
+    else if (argument.sign !== "any" && quantity.value < 0) problems.push(valueProblem(argument.name, `${quoted(quantity.given)} is below zero; ${argument.describe}.`));
     else quantities[argument.key] = quantity;
   });
   return problems.length > 0 ? { kind: "problems", problems } : { kind: "case", one: { fluid, quantities, settled, remarks } };
@@ -182,7 +182,7 @@ function convertCell(value: unknown, from: unknown, to: unknown): CellValue {
   const error = [value, from, to].find(isErrorCell);
   if (error !== undefined) return new CellError(error.code as CellError["code"], error.message ?? "");
   if (isBlank(value)) return "";
-  if (typeof value !== "number" && typeof value !== "string") return errorOf(valueProblem("value", "is not a quantity; write a number, or text with its unit."));
+  if (typeof value !== "number" && typeof value !== "string") return errorOf(valueProblem("value", `${quoted(value)} is not a quantity; write a number, or text with its unit.`));
   if (isBlankOrZero(to)) return errorOf(valueProblem("to", 'is empty; write the unit wanted, such as "W/(m²·K)".'));
   const found = convert(value, isBlankOrZero(from) ? "" : String(from), String(to));
   if (isProblem(found)) return errorOf(found);

@@ -7,7 +7,7 @@ import { settingsOf } from "../surfaces/settings.js";
 import type { Surface } from "../surfaces/surface.js";
 import type { Arguments } from "./answer.js";
 import { allBlock, compareBlock, traceBlock } from "./blocks.js";
-import { type Cases, cellAt, isSingle, shapeOf } from "./cases.js";
+import { type Cases, cellAt, isSingle, keyOfName, shapeOf } from "./cases.js";
 import { type CellBlock, CellError, type CellValue } from "./cell.js";
 import { isOwnTable, type RawCase, type ReadCase, readCase, readFluid } from "./inputs.js";
 import { layOut, problemCells, problemsEverywhere, unanswered } from "./layout.js";
@@ -46,10 +46,9 @@ export function openSurfaceCall(
   settings: CellBlock | null | undefined,
 ): SurfaceCall | { readonly problems: readonly Problem[]; readonly request: Request | Problem } {
   const request = readRequest(give, wordsOfSurface(surface), "h");
-  const keys = ["fluid", surface.wallName === "wall" ? "wall" : "surface", "bulk", ...surface.arguments.map((argument) => argument.key)];
   const names = argumentNames(surface);
   const optional = [false, false, false, ...surface.arguments.map((argument) => argument.optional === true)];
-  const blocks = keys.map((key, i) => ({ name: names[i] as string, block: blockOf(args, key), optional: optional[i] }));
+  const blocks = names.map((name, i) => ({ name, block: args[keyOfName(name)] ?? undefined, optional: optional[i] }));
   const problems: Problem[] = [];
   for (const one of blocks) {
     if (one.block === undefined && one.optional !== true) {
@@ -65,7 +64,7 @@ export function openSurfaceCall(
   const filled = blocks.map((one) => ({ name: one.name, block: one.block ?? omitted }));
   const fluidBlock = (filled[0] as { block: CellBlock }).block;
   const table = isOwnTable(fluidBlock);
-  const shaped = filled.filter((one, i) => !(i === 0 && table)).map((one) => [one.name, one.block] as const);
+  const shaped = filled.filter((_, i) => !(i === 0 && table)).map((one) => [one.name, one.block] as const);
   const settingRows = (raw as { rows: readonly ReadonlyMap<string, unknown>[] }).rows;
   const perCase: CellBlock = settingRows.length > 1 ? settingRows.map(() => [0]) : [[0]];
   const cases = shapeOf([...shaped, ["settings", perCase]]);
@@ -108,10 +107,6 @@ export function openSurfaceCall(
       return { read: readCase(surface, rawCase(row, column), fluidOf(good), good), system: good.system, settled: good };
     },
   };
-}
-
-function blockOf(args: Arguments, key: string): CellBlock | undefined {
-  return args[key] ?? undefined;
 }
 
 /** Answers a call of a surface function: a block of numbers, texts and errors. */

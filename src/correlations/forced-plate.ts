@@ -413,6 +413,17 @@ export const whitePlateLocal: Correlation = {
   note: "Earlier editions print 12.8*(Pr^0.68-1); the 2020 paper 12.7*(Pr^(2/3)-1). Gases: the paper gives 0.0296*Re^0.8*Pr^0.6 for air.",
 };
 
+export const whitePlateLocalEarlier: Correlation = {
+  ...whitePlateLocal,
+  id: "white-plate-local-earlier",
+  name: "White friction with the two-layer analogy as in earlier editions, local",
+  lines: {
+    Cf: "0.455/LN(0.06*Re)^2",
+    Nu: "(Cf/2)*Re*Pr/(1+12.8*(Pr^0.68-1)*SQRT(Cf/2))",
+  },
+  note: "The form 12.8*(Pr^0.68-1), confirmed by a worked example; 2 to 3 % below the later 12.7*(Pr^(2/3)-1) in water.",
+};
+
 export const lienhard2020PlateLocal: Correlation = {
   id: "lienhard-2020-plate-local",
   name: "Lienhard, laminar to turbulent in one line, local",

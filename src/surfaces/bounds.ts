@@ -49,6 +49,7 @@ export function boundsOf(surface: Surface, inputs: Inputs, solution: Solution): 
     ...scatterShare(surface, inputs, solution.point, nominal),
     ...formulationShare(solution.point, nominal),
     ...inputs.tolerances.flatMap((tolerance) => toleranceShare(surface, inputs, tolerance, nominal)),
+    ...profileShare(surface, inputs, nominal),
     ...rivalsOf(solution.point).flatMap((rival) => rivalShare(solution.point, rival, nominal)),
     ...limitShare(solution.point, nominal),
     ...buoyancyShare(solution.point, nominal),
@@ -161,6 +162,18 @@ function toleranceShare(surface: Surface, inputs: Inputs, tolerance: Tolerance, 
   const zero = crossing(surface, inputs, tolerance);
   if (zero !== undefined) others.push(zero);
   return [shareOf(`tolerance of ${tolerance.name}`, "given with the input", nominal, others)];
+}
+
+/** An arithmetic profile roughness stands for a sand roughness only within a factor of two. */
+function profileShare(surface: Surface, inputs: Inputs, nominal: Outcome): Share[] {
+  const profile = inputs.numbers.profileRoughness;
+  if (profile === undefined || surface.takesRoughness !== true) return [];
+  const others: Outcome[] = [];
+  for (const factor of [0.5, 2]) {
+    const end = solve(surface, { ...inputs, numbers: { ...inputs.numbers, profileRoughness: profile * factor } });
+    if (!isProblem(end)) others.push(outcomeOf(end.point));
+  }
+  return [shareOf("sand roughness from profile roughness, within a factor of 2", "common practice", nominal, others)];
 }
 
 /** Where the tolerance changes the sign of the difference, the limit at zero difference lies between its ends. */

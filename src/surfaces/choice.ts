@@ -64,10 +64,10 @@ export function described(at: Circumstances): string {
 /** Words of authors, year or name, case-blind and without accents. */
 function named(wanted: string, all: readonly Correlation[]): readonly Correlation[] | Problem {
   const words = wordsOf(wanted);
-  const found = all.filter((record) => {
-    const own = wordsOf(`${record.name} ${record.source.work} ${record.id} ${record.set ?? ""}`);
-    return words.every((word) => own.some((one) => one.startsWith(word)));
-  });
+  const ownWords = (record: Correlation): readonly string[] =>
+    wordsOf(`${record.name} ${record.source.work} ${record.id} ${record.set ?? ""}`);
+  const whole = all.filter((record) => words.every((word) => ownWords(record).includes(word)));
+  const found = whole.length > 0 ? whole : all.filter((record) => words.every((word) => ownWords(record).some((one) => one.startsWith(word))));
   const list = (records: readonly Correlation[]): string => records.map((record) => `"${labelOf(record)}"`).join(", ");
   if (found.length === 0) {
     return valueProblem("equation", `"${wanted}" names no equation that serves here; there are ${list(all)}.`);

@@ -1,8 +1,10 @@
 import type { Correlation } from "../correlations/correlation.js";
 import { correlationById } from "../correlations/index.js";
 import { serving } from "./candidates.js";
-import { mixedRivals } from "./mixing.js";
-import type { Circumstances, Surface, Variant } from "./surface.js";
+import { formatNumber, formatQuantity } from "../quantities/format.js";
+import { type Problem, valueProblem } from "../quantities/problems.js";
+import { freeMatters } from "./mixing.js";
+import type { Circumstances, Inputs, Rival, Surface, Values, Variant } from "./surface.js";
 
 /** Below this Reynolds number flow in a duct stays laminar, above the second it is turbulent; between them it may be either. */
 const laminarUpTo = 2300;
@@ -14,29 +16,92 @@ const ordinary = serving("DUCT.TUBE", ["tube-default-T-mean", "tube-default-T-lo
 
 const corrected = new Map<string, Correlation>();
 
-/** The default times its property ratio: liquids by the Prandtl numbers at bulk and wall, heated gases by the temperatures. */
-function withPropertyRatio(record: Correlation, phase: Circumstances["phase"]): Correlation {
-  const factor = correlationById(phase === "liquid" ? "property-liquid-pr" : "property-gas-temperature");
-  const id = `${record.id}+${factor.id}`;
+/**
+ * The default times its property ratio (liquids by the Prandtl numbers at bulk and wall, heated gases by the temperatures)
+ * and, where the wall is rough, times what roughness gains: less than friction does, and no more beyond four times smooth friction.
+ */
+function completed(record: Correlation, phase: Circumstances["phase"], rough: boolean): Correlation {
+  const ratio = correlationById(phase === "liquid" ? "property-liquid-pr" : "property-gas-temperature");
+  const id = `${record.id}+${ratio.id}${rough ? "+norris-1971-rough" : ""}`;
   let made = corrected.get(id);
   if (made === undefined) {
+    const friction = correlationById("churchill-1977-friction");
+    const gain = correlationById("norris-1971-rough");
+    const roughParts: Correlation["parts"] = {
+      rough: { of: friction },
+      smooth: { of: friction, with: { e_D: "0" } },
+      gain: { of: gain, with: { f_fs: "f_rough/f_smooth" } },
+    };
     made = {
       ...record,
       id,
-      name: `${record.name}, with property ratio`,
-      parts: { constant: { of: record }, ratio: { of: factor } },
+      name: `${record.name}, with property ratio${rough ? " and roughness" : ""}`,
+      parts: { constant: { of: record }, ratio: { of: ratio }, ...(rough ? roughParts : {}) },
       tables: undefined,
-      lines: { Nu: "Nu_constant*Factor_ratio" },
-      ranges: { ...record.ranges, ...factor.ranges },
-      note: `${record.note ?? ""} Times the property ratio: ${factor.note ?? ""}`.trim(),
+      lines: { Nu: rough ? "Nu_constant*Factor_ratio*Factor_gain" : "Nu_constant*Factor_ratio" },
+      ranges: { ...rangesOf(record), ...ratio.ranges, ...(rough ? { e_D: [0, roughest] as const } : {}) },
+      scatter: rough ? roughScatter(record) : record.scatter,
+      note: [record.note, `Property ratio: ${ratio.note ?? ratio.name}`, rough ? `Roughness: ${gain.note ?? gain.name}` : ""].filter(Boolean).join(" "),
     };
     corrected.set(id, made);
   }
   return made;
 }
 
+/** Ranges of a part's own helper lines go by the name the line has inside the whole. */
+function rangesOf(record: Correlation): Record<string, readonly [number, number]> {
+  return Object.fromEntries(Object.entries(record.ranges).map(([symbol, range]) => [symbol in record.lines ? `${symbol}_constant` : symbol, range]));
+}
+
+function roughScatter(record: Correlation): Correlation["scatter"] {
+  const { scatter } = record;
+  const gain = correlationById("norris-1971-rough").scatter.value;
+  if (scatter.by === undefined) return { ...scatter, value: Math.max(scatter.value, gain) };
+  const steps = scatter.by.steps.map(([upTo, value]) => [upTo, upTo <= laminarUpTo ? value : Math.max(value, gain)] as const);
+  return { ...scatter, by: { ...scatter.by, steps } };
+}
+
 function candidates(at: Circumstances): readonly Correlation[] {
-  return ordinary(at).map((record) => (record.id.startsWith("tube-default") ? withPropertyRatio(record, at.phase) : record));
+  const { numbers } = at.inputs;
+  const rough = (numbers.sandRoughness ?? numbers.profileRoughness ?? 0) > 0;
+  return ordinary(at).map((record) => (record.id.startsWith("tube-default") ? completed(record, at.phase, rough) : record));
+}
+
+/** A wall rougher than this part of the diameter is no pipe: the unit was probably µm. */
+const roughest = 0.05;
+/** Sand roughness from the arithmetic profile roughness; published relations scatter by a factor of two. */
+const sandFromProfile = 5.9;
+
+function check(inputs: Inputs): Problem | undefined {
+  const { sandRoughness, profileRoughness, diameter } = inputs.numbers;
+  const sand = sandRoughness ?? (profileRoughness === undefined ? undefined : sandFromProfile * profileRoughness);
+  if (sand === undefined || diameter === undefined || sand <= roughest * diameter) return undefined;
+  const name = sandRoughness === undefined ? "profile roughness" : "sand roughness";
+  return valueProblem(
+    name,
+    `${formatQuantity(sandRoughness ?? profileRoughness ?? 0, "length", "SI")} is more than ${roughest} of the diameter; was µm meant, such as "50 um"?`,
+  );
+}
+
+const friction: Correlation = {
+  ...correlationById("churchill-1977-friction"),
+  id: "tube-friction-beside",
+  parts: { friction: { of: correlationById("churchill-1977-friction") } },
+  lines: { frictionFactor: "f_friction" },
+};
+
+/** Laminar flow in a level tube under buoyancy: a published mixed law shows how far h may move. */
+function rivals(_: Circumstances, value: Values): readonly Rival[] {
+  const Ri = value("Ri");
+  if (!Number.isFinite(Ri) || Ri < freeMatters || value("Re") > turbulentFrom) return [];
+  return [
+    {
+      record: correlationById("brown-thomas-1965-tube"),
+      cause: "free convection in a level tube",
+      origin: "published",
+      remark: `free convection matters: Ri ${formatNumber(Ri)} is above ${freeMatters} (common practice)`,
+    },
+  ];
 }
 
 function groups({ given, local }: Variant): Record<string, string> {
@@ -48,18 +113,19 @@ function groups({ given, local }: Variant): Record<string, string> {
     heated: "IF(Ts>Tb,1,0)",
     Ref: "u*diameter*2*rho/(mu_b+mu_w)",
     Tw_Tb: "Ts/Tb",
+    Gz: "Re*Pr*D_L",
     D_L: long ? `diameter/${along}` : "0",
     ...(long ? { L_D: `${along}/diameter`, x_D: `${along}/diameter`, xs: `${along}/(diameter*Re*Pr)`, xp: `${along}/(diameter*Re)` } : {}),
     e_D: roughness(given),
     ...(given.has("length")
-      ? { wettedArea: "PI()*diameter*length", pressureDrop: "f_friction*length/diameter*rho_b*u^2/2" }
+      ? { wettedArea: "PI()*diameter*length", pressureDrop: "frictionFactor*length/diameter*rho_b*u^2/2" }
       : {}),
   };
 }
 
 function roughness(given: ReadonlySet<string>): string {
   if (given.has("sandRoughness")) return "sandRoughness/diameter";
-  if (given.has("profileRoughness")) return "5.9*profileRoughness/diameter";
+  if (given.has("profileRoughness")) return `${sandFromProfile}*profileRoughness/diameter`;
   return "0";
 }
 
@@ -79,8 +145,10 @@ export const ductTube: Surface = {
   settings: [],
   takesRoughness: true,
   groups,
-  beside: [],
+  check,
+  beside: [friction],
   candidates,
+  rivals,
   preference: "laminar limits joined (developed and Lévêque), Gnielinski 2013 through transition and beyond, with the property ratio",
   regime: (_, value) => {
     const Re = value("Re");
@@ -90,7 +158,7 @@ export const ductTube: Surface = {
   cautions: (_, value) =>
     value("Pr") < metalBelow ? ["Liquid metal: only equations made for liquid metals may be taken, never the ordinary turbulent ones."] : [],
   words: {
-    "friction factor": { symbol: "f_friction", dimension: "none", describe: "Darcy friction factor" },
+    "friction factor": { symbol: "frictionFactor", dimension: "none", describe: "Darcy friction factor" },
     "pressure drop": { symbol: "pressureDrop", dimension: "pressure", describe: "friction over the length" },
   },
 };

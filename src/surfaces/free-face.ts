@@ -23,7 +23,7 @@ const groups: Readonly<Record<string, string>> = {
   ratio: "MIN(length,width)/MAX(length,width)",
 };
 
-function regime(at: Circumstances, value: (symbol: string) => number, leaves: boolean): string {
+function regime(value: (symbol: string) => number, leaves: boolean): string {
   if (!leaves) return "fluid held against the face: slow flow to the edges";
   return `plumes leave the face, ${value("Ra") < 1e7 ? "laminar" : "turbulent"}`;
 }
@@ -43,7 +43,7 @@ function face(id: "FREE.TOPFACE" | "FREE.UNDERSIDE", title: string, describe: st
     candidates: (at): readonly Correlation[] => (leaves(at) ? unstable(at) : stable(at)),
     preference: "Raithby & Hollands 1998 for the side that buoyancy decides: continuous over all Ra",
     area: "length*width",
-    regime: (at, value) => regime(at, value, leaves(at)),
+    regime: (at, value) => regime(value, leaves(at)),
   };
 }
 

@@ -7,10 +7,12 @@ const upright = serving("FREE.PLATE", [
   "churchill-chu-1975-plate-all",
   "churchill-chu-1975-plate-laminar",
   "raithby-hollands-1998-plate-flux",
+  "raithby-hollands-1998-tilted-up",
+  "raithby-hollands-1998-tilted-down",
 ]);
 
 function tiltOf(at: Circumstances): number {
-  return at.inputs.numbers.tilt ?? 0;
+  return at.inputs.numbers.slope ?? 0;
 }
 
 function candidates(at: Circumstances): readonly Correlation[] {
@@ -40,9 +42,9 @@ export const freePlate: Surface = {
   reference: "the bulk temperature far from the plate",
   arguments: [{ key: "height", name: "height", dimensions: ["length"], sign: "positive", describe: "height of the plate along its slope, m" }],
   settings: [
-    { name: "tilt", key: "tilt", kind: "quantity", dimensions: ["angle"], low: -90, high: 90, describe: "degrees from vertical, positive when the wetted face looks up" },
+    { name: "tilt", key: "slope", kind: "quantity", dimensions: ["angle"], low: -90, high: 90, describe: "degrees from vertical, positive when the wetted face looks up" },
   ],
-  groups: ({ local }) => ({ L: local ? "position" : "height" }),
+  groups: ({ local, given }) => ({ L: local ? "position" : "height", ...(given.has("slope") ? { tilt: "ABS(slope)" } : {}) }),
   candidates,
   preference: "Raithby & Hollands 1998: continuous through transition, the exact layer as its laminar limit",
   regime: (_, value) => (value("Ra") < 1e9 ? "laminar" : "turbulent"),

@@ -1,5 +1,6 @@
 import type { Correlation } from "../correlations/correlation.js";
 import type { Fluid } from "../fluids/fluid.js";
+import type { Problem } from "../quantities/problems.js";
 import type { Dimension } from "../quantities/quantity.js";
 
 /** An argument between bulk and `give`: its key is also its symbol in the lines. */
@@ -114,6 +115,8 @@ export interface Surface {
   readonly reference: string;
   /** Lines of algebra beyond, or in place of, the standard groups. */
   groups(variant: Variant): Readonly<Record<string, string>>;
+  /** What is wrong with the dimensions taken together, before anything is evaluated. */
+  check?(inputs: Inputs): Problem | undefined;
   /** Published equations for the circumstances, in order of preference. */
   candidates(at: Circumstances): readonly Correlation[];
   /** Why the first of them stands first: for help and the pane. */
