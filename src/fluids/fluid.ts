@@ -86,6 +86,13 @@ export interface Fluid {
   /** Undefined for fluids without saturation data (air below its dome's use, oils, own tables that give none). */
   saturationAtPressure?(p: number): Saturation | Problem;
   saturationAtTemperature?(T: number): Saturation | Problem;
+  /**
+   * Of a fluid whose make-up follows from where it is asked, such as air of a relative humidity: the same fluid with the make-up that it has at
+   * the bulk's temperature and pressure, so that film and wall states keep the bulk's moisture.
+   */
+  atBulk?(T: number, p: number): Fluid | Problem;
+  /** K; below this temperature a surface in the gas is wetted. Only of gases that hold water vapour. */
+  dewPoint?(T: number, p: number): number | Problem;
   /** What the user must know about this fluid at this state (toxic, flammable, needs pressure, predictive transport …). */
   cautions(T: number, p: number): readonly string[];
 }

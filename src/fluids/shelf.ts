@@ -2,6 +2,7 @@
 import { coverageProblem, isProblem, type Problem, valueProblem } from "../quantities/problems.js";
 import { coolants } from "./coolants.js";
 import type { Fluid } from "./fluid.js";
+import { gasEntries } from "./gas-entries.js";
 import { heatTransferLiquids } from "./heat-transfer-liquids.js";
 import { liquidMetals } from "./liquid-metals.js";
 import { nearMisses } from "./near-miss.js";
@@ -9,7 +10,7 @@ import { waterEntry } from "./records/water-entry.js";
 import { seawater } from "./seawater.js";
 import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 
-const entries: readonly ShelfEntry[] = [waterEntry, ...coolants, seawater, ...heatTransferLiquids, ...liquidMetals];
+const entries: readonly ShelfEntry[] = [waterEntry, ...coolants, seawater, ...heatTransferLiquids, ...liquidMetals, ...gasEntries];
 
 /** Every entry, in the order of the list. */
 export function shelf(): readonly ShelfEntry[] {

@@ -274,6 +274,32 @@ export function saturationPressure(T: number): number {
   return square * square * 1e6;
 }
 
+/** Pa; the vapour pressure over ice, IAPWS R14-08(2011), 50 K to the triple point. */
+export function sublimationPressure(T: number): number {
+  const theta = T / 273.16;
+  const sum = -21.2144006 * theta ** 0.00333333333 + 27.3203819 * theta ** 1.20666667 - 6.1059813 * theta ** 1.70333333;
+  return 611.657 * Math.exp(sum / theta);
+}
+
+/** Pa; over liquid water above the triple point, over ice below it. */
+export function vapourPressureOfWater(T: number): number {
+  return T >= 273.16 ? saturationPressure(T) : sublimationPressure(T);
+}
+
+/** K; where water or ice has this vapour pressure, by bisection over ice. 1e-3 Pa to the critical pressure. */
+export function dewPointOf(p: number): number {
+  if (p >= 611.657) return saturationTemperature(p);
+  const wanted = Math.log(p);
+  let low = 150;
+  let high = 273.16;
+  for (let k = 0; k < 60 && high - low > 1e-9; k++) {
+    const middle = (low + high) / 2;
+    if (Math.log(sublimationPressure(middle)) > wanted) high = middle;
+    else low = middle;
+  }
+  return (low + high) / 2;
+}
+
 /** K; the same equation solved for temperature. 611.213 Pa to the critical point. */
 export function saturationTemperature(p: number): number {
   const beta = Math.sqrt(Math.sqrt(p / 1e6));
