@@ -49,7 +49,8 @@ function sentenceAbout(unit: UnitProblem): string {
 
 function measuredNumber(number: number, from: string): Measured | Problem {
   if (!Number.isFinite(number)) return valueProblem("value", "is not a finite number; write a number such as 72.");
-  if (from.trim() === "") return valueProblem("from", 'is empty; a number needs its unit, such as "degF", or write the value as text, such as "72 degF".');
+  if (from.trim() === "")
+    return valueProblem("from", 'is empty; a number needs its unit, such as "degF", or write the value as text, such as "72 degF".');
   const unit = namedUnit(from, "from");
   return isProblem(unit) ? unit : { number, unit };
 }
@@ -58,7 +59,8 @@ function measuredText(text: string, from: string): Measured | Problem {
   const shown = `"${shorten(text.trim())}"`;
   const parsed = parseQuantity(text);
   if (parsed.kind !== "quantity") return valueProblem("value", refusalSentence(shown, parsed));
-  if (parsed.half !== undefined) return valueProblem("value", `${shown} has a tolerance, which one number cannot show; convert value and half-width apart.`);
+  if (parsed.half !== undefined)
+    return valueProblem("value", `${shown} has a tolerance, which one number cannot show; convert value and half-width apart.`);
   if (parsed.unit === undefined) return measuredNumber(parsed.number, from);
   if (isProblem(parsed.unit)) return valueProblem("value", sentenceAbout(parsed.unit));
   if (from.trim() !== "") return valueProblem("from", `must stay empty, for the value ${shown} carries its own unit.`);

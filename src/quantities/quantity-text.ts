@@ -4,6 +4,7 @@
  */
 import { formatNumber } from "./format.js";
 import { isProblem } from "./problems.js";
+import { superscriptsToPowers } from "./unit-grammar.js";
 import { readUnit, shorten, type Unit, type UnitProblem } from "./units.js";
 
 export interface HalfWidth {
@@ -37,11 +38,23 @@ const cache = new Map<string, QuantityText | TextRefusal>();
 export function parseQuantity(text: string): QuantityText | TextRefusal {
   const known = cache.get(text);
   if (known !== undefined) return known;
-  const parsed = parse(tidy(text));
+  const parsed = parsePlain(text) ?? parse(tidy(text));
   if (text.length > longestText) return parsed;
   if (cache.size >= cacheSize) cache.clear();
   cache.set(text, parsed);
   return parsed;
+}
+
+const plain = /^([+-]?(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?) ?([A-Za-zµμ°%][^±+]*)?$/;
+
+/** Most texts of a long column are a plain number and a known unit; they need none of what follows. */
+function parsePlain(text: string): QuantityText | undefined {
+  const found = plain.exec(text);
+  if (found === null) return undefined;
+  const unitText = found[2]?.trim() ?? "";
+  const unit = unitText === "" ? undefined : readUnit(unitText);
+  if (isProblem(unit)) return undefined;
+  return { kind: "quantity", number: Number(found[1]), unit, unitText };
 }
 
 const NUMBER = "[+-]?(?:\\d[\\d.,]*|[.,]\\d[\\d.,]*)(?:[eE][+-]?\\d+(?![\\d.,]))?";
@@ -56,7 +69,7 @@ const fraction = /^([+-]?)(?:(\d+)[\s-]+)?(\d+)\s*[/⁄]\s*(\d+)(?![\d.,])(.*)$/
 function tidy(text: string): string {
   return text
     .slice(0, longestText + 1)
-    .replace(/(?<![\d.,])\d{1,3}(?:[\u00a0\u2009\u202f]\d{3})+(?![\d\u00a0\u2009\u202f])/g, (digits) => digits.replace(/\D/g, ""))
+    .replace(/(?<![\d.,])\d{1,3}(?:[\u00a0\u2009\u202f]\d{3})+(?![\u00a0\u2009\u202f]?\d)/g, (digits) => digits.replace(/\D/g, ""))
     .replace(/[\s\u200b\u2060\ufeff]+/g, " ")
     .trim()
     .replace(/[−﹣-]/g, "-")
@@ -70,7 +83,7 @@ function parse(text: string): QuantityText | TextRefusal {
   if (text.length > longestText) return { kind: "no number", says: "is too long for a quantity" };
   const enclosed = /^\(([^()]*±[^()]*)\)(.*)$/.exec(text);
   const parts = (enclosed?.[1] ?? text).split("±");
-  if (parts.length > 2) return refused("has more than one tolerance; write one half-width, such as \"20 ± 2 °C\"");
+  if (parts.length > 2) return refused('has more than one tolerance; write one half-width, such as "20 ± 2 °C"');
   const [left = "", right] = parts.map((part) => part.trim());
   const trouble = fractionIn(left) ?? rangeIn(left) ?? mixedDecimals(left, right);
   if (trouble) return trouble;
@@ -97,14 +110,10 @@ function leadingNumber(text: string): Leading | TextRefusal {
   const after = text.slice(written.length);
   const power = timesPowerOfTen.exec(after);
   if (power === null) return { value, rest: after.trim() };
-  const scaled = Number(`${value}e${power[1] ?? plainDigits(power[2] as string)}`);
+  const scaled = Number(`${value}e${power[1] ?? superscriptsToPowers(power[2] as string).slice(1)}`);
   // A number that has an exponent already takes no second one; `Number` then yields nothing.
   if (Number.isNaN(scaled)) return { kind: "no number", says: "does not begin with a number" };
   return { value: scaled, rest: after.slice(power[0].length).trim() };
-}
-
-function plainDigits(superscript: string): string {
-  return [...superscript].map((one) => (one === "⁻" ? "-" : one === "⁺" ? "+" : String("⁰¹²³⁴⁵⁶⁷⁸⁹".indexOf(one)))).join("");
 }
 
 /** One comma, no point, not exactly three digits after it: a decimal comma. Any other comma is refused. */
@@ -113,10 +122,13 @@ function decimal(written: string): number | TextRefusal {
   const commas = digits.split(",").length - 1;
   const points = digits.split(".").length - 1;
   const tail = exponent === undefined ? "" : `e${exponent}`;
-  if (commas === 0) return points > 1 ? { kind: "no number", says: `holds "${shorten(digits)}", which is not a number` } : Number(digits + tail);
+  if (commas === 0)
+    return points > 1 ? { kind: "no number", says: `holds "${shorten(digits)}", which is not a number` } : Number(digits + tail);
   const after = digits.length - digits.indexOf(",") - 1;
   if (commas > 1 || points > 0 || after === 0) {
-    return refused("has a comma that cannot be read for certain; write the number with one decimal point and no thousands separators, such as 1234.5");
+    return refused(
+      "has a comma that cannot be read for certain; write the number with one decimal point and no thousands separators, such as 1234.5",
+    );
   }
   if (after !== 3) return Number(digits.replace(",", ".") + tail);
   const asDecimal = digits.replace(",", ".").replace(/^([+-]?)\./, "$10.");
@@ -140,7 +152,7 @@ function fractionIn(text: string): TextRefusal | undefined {
     const example = Number.isFinite(value) ? `, such as "${`${sign}${formatNumber(value, 7)} ${rest.trim()}`.trim()}"` : "";
     return refused(`holds a fraction; write it as a decimal${example}`);
   }
-  return /[¼½¾⅐-⅞]/.test(text) ? refused("holds a fraction; write it as a decimal, such as \"0.5 in\"") : undefined;
+  return /[¼½¾⅐-⅞]/.test(text) ? refused('holds a fraction; write it as a decimal, such as "0.5 in"') : undefined;
 }
 
 function rangeIn(text: string): TextRefusal | undefined {
@@ -159,7 +171,7 @@ function rangeRefusal(from: string, to: string, unitText: string): TextRefusal {
 }
 
 function withUnit(value: number, unitText: string, half: HalfWidth | undefined): QuantityText | TextRefusal {
-  const parsed = half === undefined ? { kind: "quantity" as const, number: value, unitText } : { kind: "quantity" as const, number: value, unitText, half };
+  const parsed = { kind: "quantity", number: value, unitText, half } as const;
   if (unitText === "") return parsed;
   const unit = readUnit(unitText);
   const trouble = isProblem(unit) && unit.kind === "unknown" ? severalNumbers(value, unitText) : undefined;

@@ -33,7 +33,7 @@ function bareUnit(wanted: Dimension | readonly Dimension[], reading: Reading, ar
 function chosenUnit(text: string, wanted: Dimension | readonly Dimension[], argument: string): Unit | Problem {
   const dimensions = typeof wanted === "string" ? [wanted] : wanted;
   const unit = readUnit(text);
-  const fitting = isProblem(unit) ? undefined : fit(unit, dimensions);
+  const fitting = isProblem(unit) ? undefined : asWanted(unit, dimensions);
   if (fitting) return fitting;
   const what = isProblem(unit) ? `which ${unit.says}` : `which is ${kindOf(unit.dimension).phrase}`;
   const instead = `${phraseOf(dimensions)} needs a unit such as "${defaultUnit(dimensions[0] ?? "none", "SI").symbol}"`;
@@ -41,7 +41,7 @@ function chosenUnit(text: string, wanted: Dimension | readonly Dimension[], argu
 }
 
 /** The unit as one of the wanted dimensions; degrees serve as a temperature or as a difference, a Δ only as a difference. */
-function fit(unit: Unit, wanted: readonly Dimension[]): Unit | undefined {
+function asWanted(unit: Unit, wanted: readonly Dimension[]): Unit | undefined {
   if (wanted.includes(unit.dimension)) return unit;
   return unit.dimension === "temperature" && wanted.includes("temperature difference") ? asDifference(unit) : undefined;
 }
@@ -74,7 +74,10 @@ function belowAbsoluteZero(given: string | number, unitText: string, argument: s
 
 function belowVacuum(given: string | number, unitText: string, absolute: number, argument: string): Problem {
   const shown = shownWithUnit(given, unitText);
-  return valueProblem(argument, `${shown} is below vacuum (${formatNumber(absolute)} Pa absolute); write a positive pressure, or "psig" or "barg" for one against the ambient.`);
+  return valueProblem(
+    argument,
+    `${shown} is below vacuum (${formatNumber(absolute)} Pa absolute); write a positive pressure, or "psig" or "barg" for one against the ambient.`,
+  );
 }
 
 function quote(text: string): string {
@@ -97,14 +100,19 @@ function needed(wanted: readonly Dimension[], reading: Reading): string {
 function readText(given: string, wanted: readonly Dimension[], reading: Reading, argument: string): Quantity | Problem {
   const parsed = parseQuantity(given);
   if (parsed.kind !== "quantity") return valueProblem(argument, refusalSentence(given, parsed, wanted, reading));
-  const unit = parsed.unit === undefined ? bareUnit(wanted, reading, argument) : unitOfText(given, parsed.unit, parsed.unitText, wanted, reading, argument);
+  const unit =
+    parsed.unit === undefined
+      ? bareUnit(wanted, reading, argument)
+      : unitOfText(given, parsed.unit, parsed.unitText, wanted, reading, argument);
   if (isProblem(unit)) return unit;
   const unitText = parsed.unitText === "" ? unit.symbol : parsed.unitText;
   const nominal = quantity(parsed.number, unit, given, unitText, wanted, reading, argument);
   if (isProblem(nominal) || parsed.half === undefined) return nominal;
   const tolerance = halfWidth(given, parsed, parsed.half, unit, argument);
   if (isProblem(tolerance)) return tolerance;
-  return Number.isFinite(tolerance) ? { ...nominal, tolerance } : notFinite(given, wanted, reading, argument);
+  if (!Number.isFinite(tolerance)) return notFinite(given, wanted, reading, argument);
+  // Written out: a spread would take most of the time of reading a text again.
+  return { value: nominal.value, dimension: nominal.dimension, tolerance, given, unit: unitText };
 }
 
 function refusalSentence(given: string, refusal: TextRefusal, wanted: readonly Dimension[], reading: Reading): string {
@@ -122,7 +130,7 @@ function unitOfText(
   argument: string,
 ): Unit | Problem {
   if (isProblem(unit)) return valueProblem(argument, unitSentence(given, unit, unitText, wanted, reading));
-  const fitting = fit(unit, wanted);
+  const fitting = asWanted(unit, wanted);
   if (fitting) return fitting;
   return valueProblem(argument, `${quote(given)} is ${kindOf(unit.dimension).phrase}; ${needed(wanted, reading)}.`);
 }
@@ -150,7 +158,11 @@ function nearest(written: string, wanted: readonly Dimension[]): string {
 }
 
 function letters(text: string): string {
-  return text.slice(0, 40).normalize("NFKC").toLowerCase().replace(/[^a-zμ°%0-9]/g, "");
+  return text
+    .slice(0, 40)
+    .normalize("NFKC")
+    .toLowerCase()
+    .replace(/[^a-zμ°%0-9]/g, "");
 }
 
 /** Levenshtein's distance, by rows. */
@@ -175,15 +187,21 @@ function halfWidth(given: string, parsed: QuantityText, half: HalfWidth, unit: U
   if (kindOf(half.unit.dimension).vector.join() === kindOf(unit.dimension).vector.join()) return half.size * half.unit.factor;
   const { phrase } = kindOf(half.unit.dimension);
   const own = kindOf(unit.dimension).phrase;
-  return valueProblem(argument, `${quote(given)} has a tolerance that is ${phrase}; the tolerance of ${own} is needed, such as "± ${formatNumber(half.size)} ${parsed.unitText}".`);
+  return valueProblem(
+    argument,
+    `${quote(given)} has a tolerance that is ${phrase}; the tolerance of ${own} is needed, such as "± ${formatNumber(half.size)} ${parsed.unitText}".`,
+  );
 }
 
 function percentOf(given: string, number: number, size: number, unit: Unit, argument: string): number | Problem {
   const shown = formatNumber(number);
-  const part = formatNumber(Math.abs(number) * size / 100);
+  const part = formatNumber((Math.abs(number) * size) / 100);
   if (unit.offset !== undefined) {
     const example = `"${shown} ± 2 ${unit.symbol}"`;
-    return valueProblem(argument, `${quote(given)} has a percentage of ${unit.symbol}, whose zero is arbitrary; write the half-width in degrees, such as ${example}.`);
+    return valueProblem(
+      argument,
+      `${quote(given)} has a percentage of ${unit.symbol}, whose zero is arbitrary; write the half-width in degrees, such as ${example}.`,
+    );
   }
   if (unit.dimension === "none") {
     const percentSign = unit.symbol === "%";

@@ -43,7 +43,10 @@ export function normaliseUnit(text: string): string {
     .replace(/[⁄∕÷]/g, "/")
     .replace(/\s+/g, " ")
     .replace(/Δ[\s_-]+/g, "Δ")
-    .replace(/\b(in|inch|inches|mm|cm|ft|m)\.?\s?(?:of\s)?(?:h2o(?=[ag]?\b)|water\b|w\.c\.|wc\b)/gi, (_all, unit: string) => `${columnUnit(unit)}HHO`)
+    .replace(
+      /\b(in|inch|inches|mm|cm|ft|m)\.?\s?(?:of\s)?(?:h2o(?=[ag]?\b)|water\b|w\.c\.|wc\b)/gi,
+      (_all, unit: string) => `${columnUnit(unit)}HHO`,
+    )
     .replace(/\b(in|inch|inches|mm)\.?\s?(?:of\s)?(?:hg\b|mercury\b)/gi, (_all, unit: string) => `${columnUnit(unit)}Hg`)
     .replace(/(?:°|\bdeg(?:ree)?s?\b\.?)\s?(?=celsius|centigrade|fahrenheit|kelvin|rankine)/gi, "")
     .replace(/(?:°|\bdeg(?:ree)?s?\b\.?)[\s-]?(?=[CFKR](?![A-Za-z]))/gi, "°")
@@ -120,7 +123,8 @@ function splits(word: string, count: number, find: (part: string) => Atom | unde
   const ways: (readonly Atom[])[] = [];
   for (let at = 1; at < word.length; at++) {
     const head = find(word.slice(0, at));
-    if (!head) continue;
+    // Degrees end a run (`m2K`, `lbF`) and never begin one: `KW` and `Kg` are kilowatts and kilograms with a capital slip.
+    if (head?.vector[3] !== 0) continue;
     for (const tail of splits(word.slice(at), count - 1, find)) {
       // Two lengths run together (`mft`) are a slip of the keyboard, not an area.
       if (!tail.some((atom) => sameVector(atom.vector, head.vector))) ways.push([head, ...tail]);

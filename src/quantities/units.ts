@@ -31,31 +31,33 @@ export interface UnitProblem extends Problem {
 }
 
 /** Whole texts that no grammar of products can read. */
-const wholeTexts: ReadonlyMap<string, string> = new Map(Object.entries({
-  '"': "in",
-  "''": "in",
-  "″": "in",
-  "”": "in",
-  "'": "ft",
-  "′": "ft",
-  "’": "ft",
-  "%": "%",
-  "pct": "%",
-  "percent": "%",
-  "per cent": "%",
-  "-": "-",
-  "–": "-",
-  "—": "-",
-  "1": "-",
-  "tons of refrigeration": "ton",
-  "ton of refrigeration": "ton",
-  "refrigeration tons": "ton",
-  // Motor plates write revolutions per minute so; nobody gives radians per minute.
-  "1/min": "rpm",
-  "/min": "rpm",
-  "min^-1": "rpm",
-  "min-1": "rpm",
-}));
+const wholeTexts: ReadonlyMap<string, string> = new Map(
+  Object.entries({
+    '"': "in",
+    "''": "in",
+    "″": "in",
+    "”": "in",
+    "'": "ft",
+    "′": "ft",
+    "’": "ft",
+    "%": "%",
+    pct: "%",
+    percent: "%",
+    "per cent": "%",
+    "-": "-",
+    "–": "-",
+    "—": "-",
+    "1": "-",
+    "tons of refrigeration": "ton",
+    "ton of refrigeration": "ton",
+    "refrigeration tons": "ton",
+    // Motor plates write revolutions per minute so; nobody gives radians per minute.
+    "1/min": "rpm",
+    "/min": "rpm",
+    "min^-1": "rpm",
+    "min-1": "rpm",
+  }),
+);
 
 /** Readings so far apart, and one of them so unlikely, that neither is taken for granted. */
 const unclearTexts: ReadonlyMap<string, string> = new Map([
@@ -165,7 +167,10 @@ function foreignUnit(vector: Vector, shown: string): UnitProblem {
 
 function vectorOf(factors: readonly Factor[]): Vector {
   const sum = [0, 0, 0, 0, 0, 0] as [number, number, number, number, number, number];
-  for (const { atom, power } of factors) atom.vector.forEach((exponent, at) => { sum[at] = (sum[at] as number) + exponent * power; });
+  for (const { atom, power } of factors)
+    atom.vector.forEach((exponent, at) => {
+      sum[at] = (sum[at] as number) + exponent * power;
+    });
   return sum;
 }
 
@@ -206,49 +211,158 @@ export function shorten(text: string): string {
 
 /** Units that the lists show; the grammar reads many more. */
 const listed: Readonly<Record<Dimension, readonly (readonly [symbol: string, ...aliases: string[]])[]>> = {
-  temperature: [["°C", "C", "degC", "deg C", "celsius"], ["°F", "F", "degF", "deg F", "fahrenheit"], ["K", "degK", "kelvin"], ["°R", "R", "degR", "rankine"]],
-  "temperature difference": [["ΔK", "Δ°C", "delta C", "delta K"], ["Δ°F", "delta F", "Δ°R"]],
-  length: [
-    ["m", "metre", "meter"], ["mm", "millimetre"], ["cm"], ["µm", "um", "micron"], ["km"], ["nm"], ["in", '"', "inch"], ["ft", "'", "foot", "feet"],
-    ["µin", "uin", "microinch"], ["mil", "thou"], ["yd", "yard"], ["mi", "mile"],
+  temperature: [
+    ["°C", "C", "degC", "deg C", "celsius"],
+    ["°F", "F", "degF", "deg F", "fahrenheit"],
+    ["K", "degK", "kelvin"],
+    ["°R", "R", "degR", "rankine"],
   ],
-  area: [["m²", "m2", "m^2"], ["cm²", "cm2"], ["mm²", "mm2"], ["ft²", "ft2", "sq ft", "sqft"], ["in²", "in2", "sq in"]],
+  "temperature difference": [
+    ["ΔK", "Δ°C", "delta C", "delta K"],
+    ["Δ°F", "delta F", "Δ°R"],
+  ],
+  length: [
+    ["m", "metre", "meter"],
+    ["mm", "millimetre"],
+    ["cm"],
+    ["µm", "um", "micron"],
+    ["km"],
+    ["nm"],
+    ["in", '"', "inch"],
+    ["ft", "'", "foot", "feet"],
+    ["µin", "uin", "microinch"],
+    ["mil", "thou"],
+    ["yd", "yard"],
+    ["mi", "mile"],
+  ],
+  area: [
+    ["m²", "m2", "m^2"],
+    ["cm²", "cm2"],
+    ["mm²", "mm2"],
+    ["ft²", "ft2", "sq ft", "sqft"],
+    ["in²", "in2", "sq in"],
+  ],
   speed: [
-    ["m/s", "m s-1"], ["ft/s", "fps"], ["ft/min", "fpm"], ["km/h", "kph"], ["mph", "mi/h"], ["kn", "kt", "knot", "knots"], ["cm/s"], ["mm/s"], ["in/s"],
+    ["m/s", "m s-1"],
+    ["ft/s", "fps"],
+    ["ft/min", "fpm"],
+    ["km/h", "kph"],
+    ["mph", "mi/h"],
+    ["kn", "kt", "knot", "knots"],
+    ["cm/s"],
+    ["mm/s"],
+    ["in/s"],
   ],
   rotation: [["rad/s"], ["rpm", "rev/min", "1/min"], ["rev/s", "rps", "Hz"], ["deg/s"]],
   "mass flow": [["kg/s"], ["kg/h", "kg/hr"], ["kg/min"], ["g/s"], ["lb/h", "lbm/hr", "lb/hr"], ["lb/s", "lbm/s"], ["lb/min"], ["t/h"]],
   "volume flow": [
-    ["m³/s", "m3/s"], ["m³/h", "m3/h", "m^3/hr"], ["L/min", "l/min", "lpm"], ["L/s", "l/s"], ["L/h", "lph"], ["gpm", "gal/min"], ["cfm", "ft3/min"],
-    ["ft³/s", "cfs"], ["ft³/h", "cfh"], ["gph", "gal/h"],
+    ["m³/s", "m3/s"],
+    ["m³/h", "m3/h", "m^3/hr"],
+    ["L/min", "l/min", "lpm"],
+    ["L/s", "l/s"],
+    ["L/h", "lph"],
+    ["gpm", "gal/min"],
+    ["cfm", "ft3/min"],
+    ["ft³/s", "cfs"],
+    ["ft³/h", "cfh"],
+    ["gph", "gal/h"],
   ],
-  "mass flux": [["kg/(m²·s)", "kg/m2s", "kg/m2-s"], ["lb/(h·ft²)", "lbm/hr-ft2"], ["lb/(s·ft²)", "lbm/s-ft2"]],
+  "mass flux": [
+    ["kg/(m²·s)", "kg/m2s", "kg/m2-s"],
+    ["lb/(h·ft²)", "lbm/hr-ft2"],
+    ["lb/(s·ft²)", "lbm/s-ft2"],
+  ],
   pressure: [
-    ["Pa"], ["hPa"], ["kPa", "kPa(a)"], ["MPa"], ["bar", "bara", "bar(a)"], ["mbar"], ["atm"], ["psi", "psia"], ["psig", "psi(g)"], ["barg", "bar(g)"],
-    ["kPag", "kPa(g)"], ["inH2O", "in H2O", "inWC"], ["mmH2O"], ["inHg", "in Hg"], ["mmHg"], ["torr"], ["kgf/cm²", "kgf/cm2"], ["psf", "lbf/ft2"],
+    ["Pa"],
+    ["hPa"],
+    ["kPa", "kPa(a)"],
+    ["MPa"],
+    ["bar", "bara", "bar(a)"],
+    ["mbar"],
+    ["atm"],
+    ["psi", "psia"],
+    ["psig", "psi(g)"],
+    ["barg", "bar(g)"],
+    ["kPag", "kPa(g)"],
+    ["inH2O", "in H2O", "inWC"],
+    ["mmH2O"],
+    ["inHg", "in Hg"],
+    ["mmHg"],
+    ["torr"],
+    ["kgf/cm²", "kgf/cm2"],
+    ["psf", "lbf/ft2"],
   ],
-  "heat flux": [["W/m²", "W/m2"], ["kW/m²", "kW/m2"], ["MW/m²", "MW/m2"], ["W/cm²", "W/cm2"], ["Btu/(h·ft²)", "BTU/hr-ft2"], ["kcal/(h·m²)", "kcal/h-m2"]],
+  "heat flux": [
+    ["W/m²", "W/m2"],
+    ["kW/m²", "kW/m2"],
+    ["MW/m²", "MW/m2"],
+    ["W/cm²", "W/cm2"],
+    ["Btu/(h·ft²)", "BTU/hr-ft2"],
+    ["kcal/(h·m²)", "kcal/h-m2"],
+  ],
   power: [
-    ["W", "watt"], ["mW"], ["kW"], ["MW"], ["Btu/h", "BTU/hr"], ["kBtu/h", "MBH"], ["ton", "TR", "tons of refrigeration"], ["kcal/h"], ["hp"],
+    ["W", "watt"],
+    ["mW"],
+    ["kW"],
+    ["MW"],
+    ["Btu/h", "BTU/hr"],
+    ["kBtu/h", "MBH"],
+    ["ton", "TR", "tons of refrigeration"],
+    ["kcal/h"],
+    ["hp"],
   ],
   "film coefficient": [
-    ["W/(m²·K)", "W/m2K", "W/m^2-K", "W m-2 K-1", "W/m2C"], ["kW/(m²·K)", "kW/m2K"], ["W/(cm²·K)", "W/cm2K"],
-    ["Btu/(h·ft²·°F)", "BTU/hr-ft2-F", "Btu/h ft2 F"], ["kcal/(h·m²·°C)", "kcal/h-m2-C"],
+    ["W/(m²·K)", "W/m2K", "W/m^2-K", "W m-2 K-1", "W/m2C"],
+    ["kW/(m²·K)", "kW/m2K"],
+    ["W/(cm²·K)", "W/cm2K"],
+    ["Btu/(h·ft²·°F)", "BTU/hr-ft2-F", "Btu/h ft2 F"],
+    ["kcal/(h·m²·°C)", "kcal/h-m2-C"],
   ],
-  conductivity: [["W/(m·K)", "W/mK", "W/m-K"], ["mW/(m·K)", "mW/mK"], ["Btu/(h·ft·°F)", "BTU/hr-ft-F"], ["Btu·in/(h·ft²·°F)"], ["kcal/(h·m·°C)"]],
+  conductivity: [
+    ["W/(m·K)", "W/mK", "W/m-K"],
+    ["mW/(m·K)", "mW/mK"],
+    ["Btu/(h·ft·°F)", "BTU/hr-ft-F"],
+    ["Btu·in/(h·ft²·°F)"],
+    ["kcal/(h·m·°C)"],
+  ],
   density: [["kg/m³", "kg/m3", "kg m-3"], ["g/cm³", "g/cc", "g/cm3"], ["kg/L"], ["lb/ft³", "lbm/ft3"], ["lb/gal"]],
-  "specific heat": [["J/(kg·K)", "J/kgK", "J/kg-K"], ["kJ/(kg·K)", "kJ/kgK", "kJ/kg-K"], ["Btu/(lb·°F)", "BTU/lbm-F"], ["kcal/(kg·°C)", "kcal/kg-C"]],
-  viscosity: [["Pa·s", "Pa s", "Pa-s", "kg/(m·s)"], ["mPa·s", "mPa s"], ["µPa·s", "uPa s"], ["cP"], ["P", "poise"], ["lb/(ft·s)", "lbm/ft-s"], ["lb/(ft·h)", "lbm/ft-hr"]],
+  "specific heat": [
+    ["J/(kg·K)", "J/kgK", "J/kg-K"],
+    ["kJ/(kg·K)", "kJ/kgK", "kJ/kg-K"],
+    ["Btu/(lb·°F)", "BTU/lbm-F"],
+    ["kcal/(kg·°C)", "kcal/kg-C"],
+  ],
+  viscosity: [
+    ["Pa·s", "Pa s", "Pa-s", "kg/(m·s)"],
+    ["mPa·s", "mPa s"],
+    ["µPa·s", "uPa s"],
+    ["cP"],
+    ["P", "poise"],
+    ["lb/(ft·s)", "lbm/ft-s"],
+    ["lb/(ft·h)", "lbm/ft-hr"],
+  ],
   "kinematic viscosity": [["m²/s", "m2/s"], ["mm²/s", "mm2/s"], ["cSt"], ["St"], ["ft²/h", "ft2/hr"], ["ft²/s", "ft2/s"]],
-  expansivity: [["1/K", "K-1", "/K", "1/°C"], ["1/°F", "1/F", "1/°R"]],
-  "thermal resistance": [["K/W", "°C/W", "C/W"], ["h·°F/Btu", "hr-F/BTU"]],
+  expansivity: [
+    ["1/K", "K-1", "/K", "1/°C"],
+    ["1/°F", "1/F", "1/°R"],
+  ],
+  "thermal resistance": [
+    ["K/W", "°C/W", "C/W"],
+    ["h·°F/Btu", "hr-F/BTU"],
+  ],
   "area resistance": [["m²·K/W", "m2K/W", "m2-K/W"], ["mm²·K/W"], ["h·ft²·°F/Btu", "hr-ft2-F/BTU"]],
   "specific energy": [["J/kg"], ["kJ/kg"], ["MJ/kg"], ["Btu/lb", "BTU/lbm"], ["kcal/kg"]],
   "surface tension": [["N/m"], ["mN/m"], ["dyn/cm", "dyne/cm"], ["lbf/ft"]],
   "molar mass": [["kg/mol"], ["g/mol", "kg/kmol"], ["lb/lbmol", "lbm/lbmol"]],
-  acceleration: [["m/s²", "m/s2", "m/s^2"], ["ft/s²", "ft/s2"]],
+  acceleration: [
+    ["m/s²", "m/s2", "m/s^2"],
+    ["ft/s²", "ft/s2"],
+  ],
   angle: [["deg", "°", "degrees"], ["rad"]],
-  none: [["-", "1"], ["%", "percent"]],
+  none: [
+    ["-", "1"],
+    ["%", "percent"],
+  ],
 };
 
 let names: readonly UnitName[] | undefined;
