@@ -5,7 +5,7 @@
 import { coverageProblem, isProblem, type Problem, valueProblem } from "../quantities/problems.js";
 import type { Fluid, FluidRange, State, Uncertainty } from "./fluid.js";
 import type { GasComponent, GasProperties } from "./low-density-gas.js";
-import { impossible, outside, sayTemperature } from "./refusal.js";
+import { impossible, outside, sayTemperature, sayTenths } from "./refusal.js";
 import { dewPointOf, vapourPressureOfWater } from "./water-equations.js";
 import { backgroundConductivity, backgroundViscosity } from "./water-transport.js";
 
@@ -29,21 +29,25 @@ export interface MixtureProperties {
   readonly conductivity: number;
 }
 
-/** Mixing rules alone: properties of the parts in, of the mixture out. */
-export function mix(fractions: readonly number[], molarMasses: readonly number[], parts: readonly GasProperties[]): MixtureProperties {
+/**
+ * Mixing rules alone: properties of the parts in, of the mixture out. `polar` multiplies the interaction in the conductivity of unlike
+ * parts: 1 after Wilke, 0.85 after Tondon & Saxena for polar with nonpolar gases.
+ */
+export function mix(fractions: readonly number[], molarMasses: readonly number[], parts: readonly GasProperties[], polar = 1): MixtureProperties {
   let cp = 0;
   let viscosity = 0;
   let conductivity = 0;
   for (let i = 0; i < parts.length; i++) {
     const x = fractions[i] as number;
     const one = parts[i] as GasProperties;
-    let weight = 0;
+    let unlike = 0;
     for (let j = 0; j < parts.length; j++) {
-      weight += (fractions[j] as number) * interaction(one.viscosity / (parts[j] as GasProperties).viscosity, (molarMasses[i] as number) / (molarMasses[j] as number));
+      if (j === i) continue;
+      unlike += (fractions[j] as number) * interaction(one.viscosity / (parts[j] as GasProperties).viscosity, (molarMasses[i] as number) / (molarMasses[j] as number));
     }
     cp += x * one.cp;
-    viscosity += (x * one.viscosity) / weight;
-    conductivity += (x * one.conductivity) / weight;
+    viscosity += (x * one.viscosity) / (x + unlike);
+    conductivity += (x * one.conductivity) / (x + polar * unlike);
   }
   return { cp, viscosity, conductivity };
 }
@@ -143,7 +147,7 @@ function stateAt(T: number, p: number, molarMass: number, mixture: MixtureProper
 
 function condensing(name: string, water: number, T: number, p: number): Problem | undefined {
   if (water === 0 || T > 647 || water * p <= vapourPressureOfWater(T) * (1 + 1e-9)) return undefined;
-  return coverageProblem(undefined, `${name} at ${sayTemperature(T)} is below its dew point, ${sayTemperature(Number(dewPointOf(water * p).toFixed(1)))}: water condenses. Take a warmer state.`);
+  return coverageProblem(undefined, `${name} at ${sayTemperature(T)} is below its dew point, ${sayTenths(dewPointOf(water * p))}: water condenses. Take a warmer state.`);
 }
 
 function uncertaintyAt(T: number, p: number, count: number): Uncertainty {

@@ -9,6 +9,11 @@ export function sayTemperature(T: number): string {
   return `${figures(T - zeroCelsius)} °C`;
 }
 
+/** "56.2 °C": to a tenth of a degree, for values that are known no better. */
+export function sayTenths(T: number): string {
+  return `${figures(Math.round(10 * (T - zeroCelsius)) / 10)} °C`;
+}
+
 /** "101.325 kPa", in the unit that keeps the number short. */
 export function sayPressure(p: number): string {
   if (p >= 1e6) return `${figures(p / 1e6)} MPa`;

@@ -4,13 +4,15 @@ import { coolants } from "./coolants.js";
 import type { Fluid } from "./fluid.js";
 import { gasEntries } from "./gas-entries.js";
 import { heatTransferLiquids } from "./heat-transfer-liquids.js";
+import { humidAirEntry } from "./humid-air.js";
 import { liquidMetals } from "./liquid-metals.js";
 import { nearMisses } from "./near-miss.js";
+import { pureFluids } from "./records/pure/index.js";
 import { waterEntry } from "./records/water-entry.js";
 import { seawater } from "./seawater.js";
 import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 
-const entries: readonly ShelfEntry[] = [waterEntry, ...coolants, seawater, ...heatTransferLiquids, ...liquidMetals, ...gasEntries];
+const entries: readonly ShelfEntry[] = [waterEntry, ...pureFluids, ...coolants, seawater, ...heatTransferLiquids, ...liquidMetals, humidAirEntry, ...gasEntries];
 
 /** Every entry, in the order of the list. */
 export function shelf(): readonly ShelfEntry[] {
