@@ -152,13 +152,13 @@ export const fandBrucker1983Cylinder: Correlation = {
   towardsSurface: 0.32,
   propertiesNote: "Tb+0.32*(Ts-Tb)",
   length: "diameter",
-  lines: { Nu: "0.400*Pr^0.0432*Ra^0.25+0.503*Pr^0.0334*Ra^0.0816+0.958*Pr^0.122/Ra^0.0605" },
-  ranges: { Ra: [1e-8, 1e8], Pr: [0.7, 4e4] },
+  lines: { Nu: "0.400*Pr^0.0432*Ra^0.25+0.503*Pr^0.0334*Ra^0.0816" },
+  ranges: { Ra: [1, 1e8], Pr: [0.7, 4e4] },
   rangeOrigin: "from memory",
   scatter: { value: 0.1, origin: "from memory" },
   source: { work: "fand-brucker-1983" },
   confidence: "M",
-  note: "Without the viscous-dissipation term (factor for Gebhart number), which matters only for very long lengths or very viscous oil. Constants from memory.",
+  note: "Constants from memory. Without the third term, which holds the Gebhart number (viscous dissipation) and counts below Ra 1: the range starts there, published from 1e-8.",
 };
 
 export const raithbyHollands1998Cylinder: Correlation = {
@@ -221,7 +221,7 @@ export const hedh1983Cylinder: Correlation = {
   ranges: { RaP: [1e-4, 1e12] },
   rangeOrigin: "customary",
   scatter: { value: 0.15, origin: "common practice" },
-  limit: { of: "RaP", value: 0.360013 },
+  limit: { of: "Ra", value: 0.360013 },
   source: { work: "churchill-1983-hedh", at: "also VDI Heat Atlas, sect. F2" },
   confidence: "N",
   note: "Churchill & Chu restated on the flow length pi*D/2: 0.60*(pi/2)^0.5 = 0.752. RaP and NuP are on that length, Ra and Nu on the diameter.",
