@@ -971,6 +971,9 @@ export const bibliography = {
   "tillnerroth-1997-jpcrd": {
     cite: "R. Tillner-Roth; A. Yokozeki, An international standard equation of state for difluoromethane (R-32) for temperatures from the triple point at 136.34 K to 435 K and pressures up to 70 MPa, J. Phys. Chem. Ref. Data, vol. 26, 1997, p. 1273-1328, doi:10.1063/1.556002",
   },
+  "transformer-oil-typical-values": {
+    cite: "Typical values of mineral insulating oils of IEC 60296, common practice, from memory",
+  },
   "tufeu-1984-bbpc": {
     cite: "R. Tufeu, D. Y. Ivanov, Y. Garrabos, B. Le Neindre, Thermal conductivity of ammonia in a large temperature and pressure range including the critical region, Ber. Bunsenges. Phys. Chem. 88 (1984) 422-427",
   },

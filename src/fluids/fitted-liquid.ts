@@ -21,6 +21,8 @@ export interface LiquidDescription {
   readonly cp: Curve;
   readonly viscosity: Curve;
   readonly conductivity: Curve;
+  /** 1/K; from the slope of the density where absent. */
+  readonly expansivity?: number;
   readonly uncertainty: Uncertainty;
   /** K */
   readonly freezingPoint?: number;
@@ -70,7 +72,7 @@ function stateAt(liquid: LiquidDescription, T: number, p: number): State {
     cp: liquid.cp.at(T),
     viscosity: liquid.viscosity.at(T),
     conductivity: liquid.conductivity.at(T),
-    expansivity: -liquid.density.slope(T) / density,
+    expansivity: liquid.expansivity ?? -liquid.density.slope(T) / density,
     enthalpy: undefined,
     speedOfSound: undefined,
   };

@@ -3,21 +3,33 @@ import type { ShelfEntry } from "./shelf-entry.js";
 
 /** At most three entries, the nearest first; none where nothing is near. */
 export function nearMisses(name: string, entries: readonly ShelfEntry[]): readonly ShelfEntry[] {
-  const wanted = name.normalize("NFKC").toLowerCase().trim();
+  const wanted = name.normalize("NFKC").toLowerCase().trim().slice(0, 60);
   if (wanted === "") return [];
   return entries
     .map((entry) => ({ entry, distance: Math.min(...[entry.name, ...entry.synonyms].map((one) => distanceTo(wanted, one.toLowerCase()))) }))
-    .filter(({ distance }) => distance < 0.45)
+    .filter(({ distance }) => distance < 1)
     .sort((a, b) => a.distance - b.distance)
     .slice(0, 3)
     .map(({ entry }) => entry);
 }
 
-/** 0 for the same word, 1 for nothing in common: the share of letters to change, or less where one text holds a whole word of the other. */
+/** More than a third of the letters changed is another word. */
+const furthest = 0.34;
+
+/** 0 for the same text, below 1 where it may have been meant: few letters changed, or whole words shared. */
 function distanceTo(wanted: string, candidate: string): number {
   const letters = edits(wanted, candidate) / Math.max(wanted.length, candidate.length);
-  const shared = wordsOf(candidate).filter((word) => word.length > 2 && wordsOf(wanted).some((other) => edits(other, word) <= word.length / 6));
-  return shared.length > 0 ? Math.min(letters, 0.4 - 0.05 * shared.length) : letters;
+  const nearby = letters <= furthest ? letters : 1;
+  const own = wordsOf(wanted);
+  const others = wordsOf(candidate);
+  const shared = others.filter((word) => word.length > 2 && own.some((other) => edits(other, word) <= word.length / 6));
+  if (shared.length === 0) return nearby;
+  const share = (2 * lettersIn(shared)) / (lettersIn(own) + lettersIn(others));
+  return Math.min(nearby, 0.45 * (1 - Math.min(share, 1)));
+}
+
+function lettersIn(words: readonly string[]): number {
+  return words.reduce((sum, word) => sum + word.length, 0);
 }
 
 function wordsOf(text: string): readonly string[] {

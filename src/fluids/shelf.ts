@@ -6,13 +6,16 @@ import { gasEntries } from "./gas-entries.js";
 import { heatTransferLiquids } from "./heat-transfer-liquids.js";
 import { humidAirEntry } from "./humid-air.js";
 import { liquidMetals } from "./liquid-metals.js";
+import { mineralOils } from "./mineral-oil.js";
 import { nearMisses } from "./near-miss.js";
 import { pureFluids } from "./records/pure/index.js";
 import { waterEntry } from "./records/water-entry.js";
 import { seawater } from "./seawater.js";
+import { siliconeOils } from "./silicone-oil.js";
+import { tableLiquids } from "./table-liquids.js";
 import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 
-const entries: readonly ShelfEntry[] = [waterEntry, ...pureFluids, ...coolants, seawater, ...heatTransferLiquids, ...liquidMetals, humidAirEntry, ...gasEntries];
+const entries: readonly ShelfEntry[] = [waterEntry, ...pureFluids, ...coolants, seawater, ...tableLiquids, ...mineralOils, siliconeOils, ...heatTransferLiquids, ...liquidMetals, humidAirEntry, ...gasEntries];
 
 /** Every entry, in the order of the list. */
 export function shelf(): readonly ShelfEntry[] {
@@ -101,7 +104,7 @@ function exampleOf(entry: ShelfEntry): string {
 
 function unknown(text: string): Problem {
   const asked = parseParametrised(text);
-  const near = nearMisses(asked?.name ?? text, entries);
+  const near = nearMisses(asked && asked.unit !== "" ? asked.name : text, entries);
   const shown = near.map((entry) => `"${entry.parameter && entry.parameter.otherwise === undefined ? exampleOf(entry) : entry.name}"`);
   const hint = shown.length > 0 ? ` Did you mean ${shown.join(" or ")}?` : "";
   return valueProblem("fluid", `No fluid is called "${text}".${hint} =FILM.LIST("fluids") lists them all; a property table of your own serves too.`);

@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import type { Fluid, State } from "../../src/fluids/fluid.js";
+import { kinematicViscosity, mineralOil } from "../../src/fluids/mineral-oil.js";
 import { findFluid, shelf } from "../../src/fluids/shelf.js";
 import { isProblem } from "../../src/quantities/problems.js";
 import { numberIn, readCsv } from "../data/read-csv.js";
@@ -138,6 +139,61 @@ describe("refusals and cautions", () => {
   });
 });
 
+describe("oils", () => {
+  // ASTM D2270's own table: oils of viscosity index 95 by definition lie between L and H; typical sheets of mineral gear oils, common practice.
+  test.each([
+    [46, 6.7],
+    [100, 11.1],
+    [220, 18.7],
+    [460, 30.2],
+  ])("ISO VG %d has about %d mm²/s at 100 °C", (grade, at100) => {
+    const found = stateOf(`gear oil ${grade}`, 373.15, 101325);
+    expect(Math.abs(((found.viscosity as number) / found.density) * 1e6 / at100 - 1)).toBeLessThan(0.02);
+    const at40 = stateOf(`gear oil ISO VG ${grade}`, 313.15, 101325);
+    expect(((at40.viscosity as number) / at40.density) * 1e6).toBeCloseTo(grade, 6);
+  });
+
+  test("two viscosities give the whole line (ASTM D341), which passes through both", () => {
+    const nu = kinematicViscosity(150, 14.7);
+    expect(nu(313.15)).toBeCloseTo(150, 9);
+    expect(nu(373.15)).toBeCloseTo(14.7, 9);
+    expect(nu(293.15)).toBeGreaterThan(400);
+  });
+
+  // Cragoe 1929 at 20 °C, specific gravity 0.88: k = 0.1172/0.88·(1 − 0.0108), cp = (1685 + 68)/√0.88; the paper's equations worked by hand.
+  test("transformer oil by Cragoe's estimates", () => {
+    const found = stateOf("transformer oil", 293.15, 101325);
+    expect(found.conductivity).toBeCloseTo(0.1317, 3);
+    expect(Math.abs(found.cp / 1869 - 1)).toBeLessThan(2e-3);
+    // Common practice: thermal expansion of mineral oil about 7e-4 1/K.
+    expect(Math.abs((found.expansivity as number) / 7.1e-4 - 1)).toBeLessThan(0.05);
+  });
+
+  test("silicone oil has its grade at 25 °C", () => {
+    for (const grade of [10, 100, 5000]) {
+      const found = stateOf(`silicone oil ${grade} cSt`, 298.15, 101325);
+      expect(((found.viscosity as number) / found.density) * 1e6).toBeCloseTo(grade, 6);
+    }
+    expect(stateOf("silicone oil 100", 298.15, 101325).density).toBeCloseTo(966, 6);
+  });
+
+  test.each([
+    ["gear oil 5", /10 to 1500/],
+    ["silicone oil 100 %", /given in cSt/],
+    ["gear oil", /needs its ISO viscosity grade.*"gear oil 220"/],
+  ])("%s is refused", (name, sentence) => {
+    const found = findFluid(name);
+    expect(isProblem(found) ? found.sentence : "found").toMatch(sentence);
+  });
+
+  test("contradictory sheets are refused", () => {
+    const sheet = { name: "oil", viscosity40: 10, viscosity100: 12, density15: 880, flashPoint: 200, T: [273, 400] as const, sources: [], viscosityUncertainty: 0.1 };
+    expect(isProblem(mineralOil(sheet))).toBe(true);
+    expect(isProblem(mineralOil({ ...sheet, viscosity100: 3, density15: 8 }))).toBe(true);
+    expect(isProblem(mineralOil({ ...sheet, viscosity100: 3 }))).toBe(false);
+  });
+});
+
 describe("laws", () => {
   const families = ["coolant", "oil", "metal or salt"];
   const entries = shelf().filter((entry) => families.includes(entry.family));
@@ -158,7 +214,9 @@ describe("laws", () => {
         const step = 1e-3;
         if (T - step < coldest || T + step > hottest) return;
         const slope = ((fluid.density(T + step, 5e6) as number) - (fluid.density(T - step, 5e6) as number)) / (2 * step);
-        expect(Math.abs(-slope / found.density - (found.expansivity as number))).toBeLessThan(1e-6);
+        // A handbook's table prints expansivity to two digits in a column of its own, beside its densities.
+        const tabled = fluid.sources.includes("incropera-a5");
+        expect(Math.abs(-slope / found.density - (found.expansivity as number))).toBeLessThan(tabled ? 2e-4 : 1e-6);
       }),
       { numRuns: 200 },
     );
