@@ -282,7 +282,7 @@ export const metals: readonly MetalRecord[] = [
     conductivity: { form: "from", base: 533.15, c: [0.421, -6.53e-4] },
     uncertainty: { density: 0.02, cp: 0.25, viscosity: 0.1, conductivity: 0.2 },
     origin: "published",
-    cautions: ["cp of ternary nitrate salt: 1560 J/(kg·K) is the usual design value; another published fit gives 25 % more, and the bounds hold that.", oxidiser],
+    cautions: ["The cp of ternary nitrate salt is disputed: 1560 J/(kg·K) is the usual design value; another published fit gives 25 % more, and the bounds hold that.", oxidiser],
   },
   {
     name: "FLiBe",
@@ -312,6 +312,6 @@ export const metals: readonly MetalRecord[] = [
     conductivity: { form: "kelvin", c: [0.43, 5e-4] },
     uncertainty: { density: 0.02, cp: 0.2, viscosity: 0.2, conductivity: 0.15 },
     origin: "published",
-    cautions: ["cp of FLiNaK: 2010 J/(kg·K) here; 1884 is also in use, and the bounds hold that."],
+    cautions: ["The cp of FLiNaK is 2010 J/(kg·K) here; 1884 is also in use, and the bounds hold that."],
   },
 ];
