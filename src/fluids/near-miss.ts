@@ -18,14 +18,22 @@ const furthest = 0.34;
 
 /** 0 for the same text, below 1 where it may have been meant: few letters changed, or whole words shared. */
 function distanceTo(wanted: string, candidate: string): number {
-  const letters = edits(wanted, candidate) / Math.max(wanted.length, candidate.length);
-  const nearby = letters <= furthest ? letters : 1;
+  const longer = Math.max(wanted.length, candidate.length);
+  const nearby = within(wanted, candidate, furthest * longer) ? edits(wanted, candidate) / longer : 1;
   const own = wordsOf(wanted);
   const others = wordsOf(candidate);
-  const shared = others.filter((word) => word.length > 2 && own.some((other) => edits(other, word) <= word.length / 6));
+  const shared = others.filter((word) => word.length > 2 && own.some((other) => within(other, word, word.length / 6)));
   if (shared.length === 0) return nearby;
   const share = (2 * lettersIn(shared)) / (lettersIn(own) + lettersIn(others));
   return Math.min(nearby, 0.45 * (1 - Math.min(share, 1)));
+}
+
+/** Whether few enough edits lead from one text to the other; most pairs are told apart by their lengths or their letters alone. */
+function within(a: string, b: string, most: number): boolean {
+  if (a === b) return true;
+  if (most < 1 || Math.abs(a.length - b.length) > most) return false;
+  const missing = [...a].filter((letter) => !b.includes(letter)).length;
+  return missing <= most && edits(a, b) <= most;
 }
 
 function lettersIn(words: readonly string[]): number {
