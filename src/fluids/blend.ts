@@ -38,7 +38,9 @@ function airParts(fraction: number): readonly (Part | Problem)[] {
 
 function partOf(name: string, fraction: number): Part | Problem {
   const key = keyOf(name);
-  const gas = lowDensityGases.find((one) => keyOf(one.formula) === key || keyOf(one.name) === key) ?? (key === "water" || key === "steam" ? steam() : undefined);
+  const gas =
+    lowDensityGases.find((one) => keyOf(one.formula) === key || keyOf(one.name) === key) ??
+    (key === "water" || key === "steam" ? steam() : undefined);
   if (gas) return { gas, fraction };
   const shelved = shelfGas(name);
   return isProblem(shelved) ? shelved : { gas: shelved, fraction };
@@ -58,7 +60,8 @@ function shelfGas(name: string): GasComponent | Problem {
   const { molarMass } = fluid;
   if (molarMass === undefined) return valueProblem("composition", `"${name}" is itself a mixture; name its parts.`);
   const span = gasSpan(fluid);
-  if (!span) return coverageProblem("composition", `"${name}" has no published viscosity and conductivity as a thin gas, so it cannot be mixed.`);
+  if (!span)
+    return coverageProblem("composition", `"${name}" has no published viscosity and conductivity as a thin gas, so it cannot be mixed.`);
   return {
     formula: fluid.name,
     name: fluid.name,

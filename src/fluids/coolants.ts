@@ -4,7 +4,7 @@
  */
 import { coverageProblem, type Problem } from "../quantities/problems.js";
 import { type Curve, curveOf, type Fit, valueAt } from "./fit.js";
-import { fittedLiquid, fitPressureRange } from "./fitted-liquid.js";
+import { fitPressureRange, fittedLiquid } from "./fitted-liquid.js";
 import type { Fluid, Uncertainty } from "./fluid.js";
 import records from "./records/aqueous-coolants.json";
 import type { Basis, ShelfEntry } from "./shelf-entry.js";
@@ -41,19 +41,41 @@ const flammable = "Solutions of alcohol give off flammable vapour; local codes c
 const solutes: readonly Solute[] = [
   {
     name: "ethylene glycol",
-    synonyms: ["MEG", "EG", "monoethylene glycol", "ethylene glycol-water", "ethylene glycol water", "aqueous ethylene glycol", "1,2-ethanediol"],
+    synonyms: [
+      "MEG",
+      "EG",
+      "monoethylene glycol",
+      "ethylene glycol-water",
+      "ethylene glycol water",
+      "aqueous ethylene glycol",
+      "1,2-ethanediol",
+    ],
     cautions: ["Ethylene glycol is toxic; keep it from drinking water and drains.", plainSolution],
     molarMass: 62.068e-3,
     example: 40,
   },
   {
     name: "propylene glycol",
-    synonyms: ["MPG", "PG", "monopropylene glycol", "propylene glycol-water", "propylene glycol water", "aqueous propylene glycol", "1,2-propanediol"],
+    synonyms: [
+      "MPG",
+      "PG",
+      "monopropylene glycol",
+      "propylene glycol-water",
+      "propylene glycol water",
+      "aqueous propylene glycol",
+      "1,2-propanediol",
+    ],
     cautions: [plainSolution],
     molarMass: 76.094e-3,
     example: 40,
   },
-  { name: "ethanol-water", synonyms: ["ethanol water", "aqueous ethanol"], withNumber: ["ethanol", "ethyl alcohol"], cautions: [flammable], example: 25 },
+  {
+    name: "ethanol-water",
+    synonyms: ["ethanol water", "aqueous ethanol"],
+    withNumber: ["ethanol", "ethyl alcohol"],
+    cautions: [flammable],
+    example: 25,
+  },
   {
     name: "methanol-water",
     synonyms: ["methanol water", "aqueous methanol"],
@@ -76,13 +98,55 @@ const solutes: readonly Solute[] = [
     cautions: ["Ammonia is toxic and leaves the solution as gas; it needs a closed vessel, and codes for ammonia plant come first."],
     example: 20,
   },
-  { name: "potassium carbonate", synonyms: ["K2CO3", "potassium carbonate brine", "potash"], cautions: ["Strongly alkaline; attacks aluminium and zinc."], molarMass: 138.205e-3, example: 30 },
-  { name: "calcium chloride", synonyms: ["CaCl2", "calcium chloride brine", "CaCl2 brine"], cautions: [corrosive], molarMass: 110.984e-3, example: 20 },
-  { name: "magnesium chloride", synonyms: ["MgCl2", "magnesium chloride brine", "MgCl2 brine"], cautions: [corrosive], molarMass: 95.211e-3, example: 15 },
-  { name: "sodium chloride", synonyms: ["NaCl", "sodium chloride brine", "NaCl brine", "salt brine", "salt water"], cautions: [corrosive], molarMass: 58.443e-3, example: 15 },
-  { name: "potassium acetate", synonyms: ["CH3COOK", "CH3CO2K", "potassium acetate brine"], cautions: [], molarMass: 98.142e-3, example: 30 },
-  { name: "potassium formate", synonyms: ["HCOOK", "KCOOH", "KCHO2", "potassium formate brine"], cautions: ["Published data of potassium formate scatter by 2 to 5 % in viscosity."], molarMass: 84.116e-3, example: 30 },
-  { name: "lithium chloride", synonyms: ["LiCl", "lithium chloride brine", "LiCl brine"], cautions: [corrosive], molarMass: 42.394e-3, example: 20 },
+  {
+    name: "potassium carbonate",
+    synonyms: ["K2CO3", "potassium carbonate brine", "potash"],
+    cautions: ["Strongly alkaline; attacks aluminium and zinc."],
+    molarMass: 138.205e-3,
+    example: 30,
+  },
+  {
+    name: "calcium chloride",
+    synonyms: ["CaCl2", "calcium chloride brine", "CaCl2 brine"],
+    cautions: [corrosive],
+    molarMass: 110.984e-3,
+    example: 20,
+  },
+  {
+    name: "magnesium chloride",
+    synonyms: ["MgCl2", "magnesium chloride brine", "MgCl2 brine"],
+    cautions: [corrosive],
+    molarMass: 95.211e-3,
+    example: 15,
+  },
+  {
+    name: "sodium chloride",
+    synonyms: ["NaCl", "sodium chloride brine", "NaCl brine", "salt brine", "salt water"],
+    cautions: [corrosive],
+    molarMass: 58.443e-3,
+    example: 15,
+  },
+  {
+    name: "potassium acetate",
+    synonyms: ["CH3COOK", "CH3CO2K", "potassium acetate brine"],
+    cautions: [],
+    molarMass: 98.142e-3,
+    example: 30,
+  },
+  {
+    name: "potassium formate",
+    synonyms: ["HCOOK", "KCOOH", "KCHO2", "potassium formate brine"],
+    cautions: ["Published data of potassium formate scatter by 2 to 5 % in viscosity."],
+    molarMass: 84.116e-3,
+    example: 30,
+  },
+  {
+    name: "lithium chloride",
+    synonyms: ["LiCl", "lithium chloride brine", "LiCl brine"],
+    cautions: [corrosive],
+    molarMass: 42.394e-3,
+    example: 20,
+  },
 ];
 
 // Typical of the handbook, widest of each: "density 0.2 to 0.5 %, cp 1 to 2 %, viscosity 3 to 5 %, conductivity 2 to 3 %".
@@ -122,7 +186,10 @@ function entryOf(solute: Solute): ShelfEntry {
 }
 
 function coldestOf(record: CoolantRecord): number {
-  return Math.max(record.T[0], Math.min(...[0, 0.25, 0.5, 0.75, 1].map((u) => freezingAt(record, record.x[0] + u * (record.x[1] - record.x[0])))));
+  return Math.max(
+    record.T[0],
+    Math.min(...[0, 0.25, 0.5, 0.75, 1].map((u) => freezingAt(record, record.x[0] + u * (record.x[1] - record.x[0])))),
+  );
 }
 
 function freezingAt(record: CoolantRecord, x: number): number {

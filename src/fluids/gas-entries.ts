@@ -41,7 +41,9 @@ function partsOf(mixture: NamedMixture): readonly Part[] {
 
 function mixtureEntry(mixture: NamedMixture): ShelfEntry {
   const parts = partsOf(mixture);
-  const percents = Object.entries(mixture.composition).map(([formula, fraction]) => `${formula} ${Number((100 * fraction).toPrecision(4))} %`);
+  const percents = Object.entries(mixture.composition).map(
+    ([formula, fraction]) => `${formula} ${Number((100 * fraction).toPrecision(4))} %`,
+  );
   return {
     name: mixture.name,
     synonyms: mixture.synonyms,

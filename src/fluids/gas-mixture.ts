@@ -33,7 +33,12 @@ export interface MixtureProperties {
  * Mixing rules alone: properties of the parts in, of the mixture out. `polar` multiplies the interaction in the conductivity of unlike
  * parts: 1 after Wilke, 0.85 after Tondon & Saxena for polar with nonpolar gases.
  */
-export function mix(fractions: readonly number[], molarMasses: readonly number[], parts: readonly GasProperties[], polar = 1): MixtureProperties {
+export function mix(
+  fractions: readonly number[],
+  molarMasses: readonly number[],
+  parts: readonly GasProperties[],
+  polar = 1,
+): MixtureProperties {
   let cp = 0;
   let viscosity = 0;
   let conductivity = 0;
@@ -43,7 +48,9 @@ export function mix(fractions: readonly number[], molarMasses: readonly number[]
     let unlike = 0;
     for (let j = 0; j < parts.length; j++) {
       if (j === i) continue;
-      unlike += (fractions[j] as number) * interaction(one.viscosity / (parts[j] as GasProperties).viscosity, (molarMasses[i] as number) / (molarMasses[j] as number));
+      unlike +=
+        (fractions[j] as number) *
+        interaction(one.viscosity / (parts[j] as GasProperties).viscosity, (molarMasses[i] as number) / (molarMasses[j] as number));
     }
     cp += x * one.cp;
     viscosity += (x * one.viscosity) / (x + unlike);
@@ -72,7 +79,10 @@ export function mixtureOf(parts: readonly Part[], about: MixtureAbout): Fluid | 
   const fault = compositionFault(merged, sum);
   if (fault) return fault;
   const present = merged.filter((part) => part.fraction > 0);
-  return fluidOf(present.map(({ gas, fraction }) => ({ gas, fraction: fraction / sum })), about);
+  return fluidOf(
+    present.map(({ gas, fraction }) => ({ gas, fraction: fraction / sum })),
+    about,
+  );
 }
 
 function mergeParts(parts: readonly Part[]): readonly Part[] {
@@ -98,8 +108,20 @@ function fluidOf(parts: readonly Part[], about: MixtureAbout): Fluid {
   const molarMass = fractions.reduce((all, x, k) => all + x * (molarMasses[k] as number), 0);
   const water = parts.find((part) => part.gas.formula === "H2O")?.fraction ?? 0;
   const range: FluidRange = { T: [Math.max(...parts.map(coldestOf)), Math.min(...parts.map((part) => part.gas.T[1]))], p: pressureRange };
-  const refusal = (T: number, p: number): Problem | undefined => impossible(T, p) ?? outside(about.name, range, T, p) ?? condensing(about.name, water, T, p);
-  const state = (T: number, p: number): State | Problem => refusal(T, p) ?? stateAt(T, p, molarMass, mix(fractions, molarMasses, parts.map((part) => propertiesAt(part.gas, T))));
+  const refusal = (T: number, p: number): Problem | undefined =>
+    impossible(T, p) ?? outside(about.name, range, T, p) ?? condensing(about.name, water, T, p);
+  const state = (T: number, p: number): State | Problem =>
+    refusal(T, p) ??
+    stateAt(
+      T,
+      p,
+      molarMass,
+      mix(
+        fractions,
+        molarMasses,
+        parts.map((part) => propertiesAt(part.gas, T)),
+      ),
+    );
   return {
     name: about.name,
     synonyms: about.synonyms,
@@ -147,22 +169,37 @@ function stateAt(T: number, p: number, molarMass: number, mixture: MixtureProper
 
 function condensing(name: string, water: number, T: number, p: number): Problem | undefined {
   if (water === 0 || T > 647 || water * p <= vapourPressureOfWater(T) * (1 + 1e-9)) return undefined;
-  return coverageProblem(undefined, `${name} at ${sayTemperature(T)} is below its dew point, ${sayTenths(dewPointOf(water * p))}: water condenses. Take a warmer state.`);
+  return coverageProblem(
+    undefined,
+    `${name} at ${sayTemperature(T)} is below its dew point, ${sayTenths(dewPointOf(water * p))}: water condenses. Take a warmer state.`,
+  );
 }
 
 function uncertaintyAt(T: number, p: number, count: number): Uncertainty {
   const hot = T > 1000;
   const mixing = count > 1 ? 0.02 : 0;
   const density = 0.001 + (0.005 * p) / 1e5;
-  return { density, cp: 0.01, viscosity: (hot ? 0.05 : 0.02) + mixing, conductivity: (hot ? 0.1 : 0.05) + mixing, expansivity: density, origin: "published" };
+  return {
+    density,
+    cp: 0.01,
+    viscosity: (hot ? 0.05 : 0.02) + mixing,
+    conductivity: (hot ? 0.1 : 0.05) + mixing,
+    expansivity: density,
+    origin: "published",
+  };
 }
 
 function cautionsAt(about: MixtureAbout, parts: readonly Part[], water: number, T: number, p: number): readonly string[] {
   const said = [...about.cautions];
   if (T > dissociating) said.push("Above about 1700 °C gases dissociate; these figures keep the composition frozen.");
-  if (water > 0 && T < dewPointOf(water * p) + 20) said.push("Near the dew point water may condense on colder surfaces; its latent heat is not in h.");
-  if (parts.some((part) => part.gas.formula === "SO2") && water > 0 && T < 433) said.push("Flue gas with sulfur has an acid dew point at about 110 to 150 °C; colder surfaces corrode.");
-  if (parts.some((part) => part.gas.formula === "CO" || part.gas.formula === "H2S" || part.gas.formula === "NO" || part.gas.formula === "NO2")) said.push("The gas is toxic; local codes and licensed practice come first.");
+  if (water > 0 && T < dewPointOf(water * p) + 20)
+    said.push("Near the dew point water may condense on colder surfaces; its latent heat is not in h.");
+  if (parts.some((part) => part.gas.formula === "SO2") && water > 0 && T < 433)
+    said.push("Flue gas with sulfur has an acid dew point at about 110 to 150 °C; colder surfaces corrode.");
+  if (
+    parts.some((part) => part.gas.formula === "CO" || part.gas.formula === "H2S" || part.gas.formula === "NO" || part.gas.formula === "NO2")
+  )
+    said.push("The gas is toxic; local codes and licensed practice come first.");
   return said;
 }
 

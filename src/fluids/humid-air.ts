@@ -191,7 +191,14 @@ function stateOf(T: number, p: number, xw: number): State {
 
 // ---- the fluid -----------------------------------------------------------------------------------------------------------------------
 
-const uncertaintyOfHumidAir: Uncertainty = { density: 1e-3, cp: 0.01, viscosity: 0.03, conductivity: 0.03, expansivity: 2e-3, origin: "from memory" };
+const uncertaintyOfHumidAir: Uncertainty = {
+  density: 1e-3,
+  cp: 0.01,
+  viscosity: 0.03,
+  conductivity: 0.03,
+  expansivity: 2e-3,
+  origin: "from memory",
+};
 const sources = ["hyland-wexler-1983", "iapws-r7-97", "mcbride-2002", "lemmon-2004-ijt", "wilke-1950", "mason-saxena-1958"] as const;
 const synonyms = ["moist air", "wet air", "damp air"] as const;
 
@@ -209,7 +216,10 @@ function ofRelativeHumidity(percent: number): Fluid | Problem {
   const fraction = (T: number, p: number): number | Problem => {
     const xw = (percent / 100) * saturatedFraction(T, p);
     if (percent > 0 && vapourPressureOfWater(Math.min(T, 647)) >= p) {
-      return coverageProblem(undefined, `Relative humidity has no meaning at ${sayTemperature(T)} and ${sayPressure(p)}, where water boils; give a dew point instead.`);
+      return coverageProblem(
+        undefined,
+        `Relative humidity has no meaning at ${sayTemperature(T)} and ${sayPressure(p)}, where water boils; give a dew point instead.`,
+      );
     }
     return xw;
   };
@@ -224,17 +234,24 @@ function ofRelativeHumidity(percent: number): Fluid | Problem {
 
 function ofDewPoint(T: number): Fluid | Problem {
   if (!Number.isFinite(T) || isBelow(T, 173.15) || isBelow(range.T[1], T)) {
-    return valueProblem("dew point", `A dew point between -100 °C and 200 °C is needed; ${Number.isFinite(T) ? sayTemperature(T) : "no number"} was given.`);
+    return valueProblem(
+      "dew point",
+      `A dew point between -100 °C and 200 °C is needed; ${Number.isFinite(T) ? sayTemperature(T) : "no number"} was given.`,
+    );
   }
   return fluidOf(`humid air of dew point ${sayTemperature(Number(T.toFixed(3)))}`, (_T, p) => {
     const xw = saturatedFraction(T, p);
     if (xw < 1) return xw;
-    return coverageProblem(undefined, `A dew point of ${sayTemperature(T)} does not exist at ${sayPressure(p)}, where water boils below it.`);
+    return coverageProblem(
+      undefined,
+      `A dew point of ${sayTemperature(T)} does not exist at ${sayPressure(p)}, where water boils below it.`,
+    );
   });
 }
 
 function ofHumidityRatio(ratio: number): Fluid | Problem {
-  if (!(ratio >= 0 && ratio <= 10)) return valueProblem("humidity", `A humidity ratio of ${figures(ratio)} kg/kg is none; zero to 10 is needed.`);
+  if (!(ratio >= 0 && ratio <= 10))
+    return valueProblem("humidity", `A humidity ratio of ${figures(ratio)} kg/kg is none; zero to 10 is needed.`);
   const moles = ratio / waterMass;
   return ofFraction(moles / (moles + 1 / airMass), `humid air of ${figures(ratio)} kg/kg`);
 }

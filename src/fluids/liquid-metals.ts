@@ -1,6 +1,6 @@
 /** Liquid metals and molten salts at about atmospheric pressure, by the handbooks' fits. */
 import { type Curve, exponentialOf, numerical, polynomial } from "./fit.js";
-import { fittedLiquid, fitPressureRange } from "./fitted-liquid.js";
+import { fitPressureRange, fittedLiquid } from "./fitted-liquid.js";
 import type { Uncertainty } from "./fluid.js";
 import { type MetalFit, type MetalRecord, metals } from "./records/liquid-metals.js";
 import type { ShelfEntry } from "./shelf-entry.js";

@@ -4,7 +4,7 @@
  */
 import { type Problem, valueProblem } from "../quantities/problems.js";
 import { type Curve, numerical } from "./fit.js";
-import { fittedLiquid, fitPressureRange } from "./fitted-liquid.js";
+import { fitPressureRange, fittedLiquid } from "./fitted-liquid.js";
 import type { Fluid, Uncertainty } from "./fluid.js";
 import type { ShelfEntry } from "./shelf-entry.js";
 import { viscosityAt100 } from "./viscosity-index.js";
@@ -54,9 +54,13 @@ const waterAt60F = 999.016;
 /** The oil of a data sheet as a fluid; contradictory or missing figures are a `Problem`. */
 export function mineralOil(sheet: OilSheet): Fluid | Problem {
   if (!(sheet.viscosity40 > sheet.viscosity100 && sheet.viscosity100 >= 1)) {
-    return valueProblem("fluid", `An oil of ${sheet.viscosity40} mm²/s at 40 °C cannot have ${sheet.viscosity100} mm²/s at 100 °C; the second must be smaller, and 1 or more.`);
+    return valueProblem(
+      "fluid",
+      `An oil of ${sheet.viscosity40} mm²/s at 40 °C cannot have ${sheet.viscosity100} mm²/s at 100 °C; the second must be smaller, and 1 or more.`,
+    );
   }
-  if (!(sheet.density15 > 600 && sheet.density15 < 1200)) return valueProblem("fluid", `A density of ${sheet.density15} kg/m³ at 15 °C is none of a mineral oil.`);
+  if (!(sheet.density15 > 600 && sheet.density15 < 1200))
+    return valueProblem("fluid", `A density of ${sheet.density15} kg/m³ at 15 °C is none of a mineral oil.`);
   const nu = kinematicViscosity(sheet.viscosity40, sheet.viscosity100);
   const density = densityOf(sheet.density15);
   const gravity = sheet.density15 / waterAt60F;
@@ -71,7 +75,14 @@ export function mineralOil(sheet: OilSheet): Fluid | Problem {
     cp: { at: (T) => (1685 + 3.4 * (T - zeroCelsius)) / Math.sqrt(gravity), slope: () => 3.4 / Math.sqrt(gravity) },
     conductivity: { at: (T) => (0.1172 * (1 - 5.4e-4 * (T - zeroCelsius))) / gravity, slope: () => (-0.1172 * 5.4e-4) / gravity },
     viscosity: numerical((T) => 1e-6 * nu(T) * density.at(T)),
-    uncertainty: { density: 0.02, cp: 0.05, viscosity: sheet.viscosityUncertainty, conductivity: 0.1, expansivity: 0.1, origin: "common practice" } satisfies Uncertainty,
+    uncertainty: {
+      density: 0.02,
+      cp: 0.05,
+      viscosity: sheet.viscosityUncertainty,
+      conductivity: 0.1,
+      expansivity: 0.1,
+      origin: "common practice",
+    } satisfies Uncertainty,
     flashPoint: sheet.flashPoint + zeroCelsius,
     cautions: sheet.cautions ?? [],
   });
@@ -96,13 +107,26 @@ function gearOil(grade: number): Fluid | Problem {
     sources: gearSources,
     // The grade allows ±10 % at 40 °C; the index of mineral oils, 90 to 100, adds as much at the ends.
     viscosityUncertainty: 0.2,
-    cautions: ["Viscosity from the ISO grade with a viscosity index of 95; synthetic and multigrade oils differ: give the data sheet's figures in a table."],
+    cautions: [
+      "Viscosity from the ISO grade with a viscosity index of 95; synthetic and multigrade oils differ: give the data sheet's figures in a table.",
+    ],
   });
 }
 
 const gear: ShelfEntry = {
   name: "gear oil",
-  synonyms: ["gear oil VG", "gear oil ISO VG", "ISO VG", "VG", "hydraulic oil", "hydraulic oil VG", "hydraulic oil ISO VG", "machine oil", "mineral oil ISO VG", "turbine oil"],
+  synonyms: [
+    "gear oil VG",
+    "gear oil ISO VG",
+    "ISO VG",
+    "VG",
+    "hydraulic oil",
+    "hydraulic oil VG",
+    "hydraulic oil ISO VG",
+    "machine oil",
+    "mineral oil ISO VG",
+    "turbine oil",
+  ],
   family: "oil",
   sources: gearSources,
   summary: "Mineral gear, machine or hydraulic oil by its ISO viscosity grade; estimates from grade and density.",
@@ -120,7 +144,8 @@ interface TypicalOil extends Omit<OilSheet, "sources"> {
   readonly source: "quench-oil-typical-values" | "transformer-oil-typical-values";
 }
 
-const quenchCaution = "Quench oil ages, and water in it is dangerous: fire and explosion hazard; local codes and licensed practice come first.";
+const quenchCaution =
+  "Quench oil ages, and water in it is dangerous: fire and explosion hazard; local codes and licensed practice come first.";
 
 const typicalOils: readonly TypicalOil[] = [
   {

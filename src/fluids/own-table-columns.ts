@@ -68,7 +68,16 @@ export const columnKinds: Readonly<Record<ColumnName, ColumnKind>> = {
   "latent heat": {
     dimension: "specific energy",
     signed: false,
-    synonyms: ["hfg", "h fg", "heat of vaporisation", "heat of vaporization", "enthalpy of vaporisation", "enthalpy of vaporization", "latent heat of vaporisation", "latent heat of vaporization"],
+    synonyms: [
+      "hfg",
+      "h fg",
+      "heat of vaporisation",
+      "heat of vaporization",
+      "enthalpy of vaporisation",
+      "enthalpy of vaporization",
+      "latent heat of vaporisation",
+      "latent heat of vaporization",
+    ],
   },
   "surface tension": { dimension: "surface tension", signed: false, synonyms: ["sigma", "σ"] },
   "vapour density": { dimension: "density", signed: false, synonyms: ofVapour(densityWords) },
@@ -106,14 +115,20 @@ export function columnOf(header: string, at: number): Column | Problem {
   const unit = bracketed?.[2]?.trim();
   const name = byWord.get(keyOf(word));
   if (name === undefined) {
-    return valueProblem("fluid", `The table's header "${header}" is not known; headers are ${names.join(", ")}, each with its unit in brackets.`);
+    return valueProblem(
+      "fluid",
+      `The table's header "${header}" is not known; headers are ${names.join(", ")}, each with its unit in brackets.`,
+    );
   }
   if (unit === undefined || unit === "") return { name, at, header };
   if (columnKinds[name].dimension === "none") return unitlessColumn(name, at, header, unit);
   const found = readUnit(unit);
   if (isProblem(found)) return valueProblem("fluid", `The table's header "${header}" has a unit that is not understood: ${found.sentence}`);
   if (!serves(found.dimension, columnKinds[name].dimension)) {
-    return valueProblem("fluid", `The table's header "${header}" has the unit of a ${found.dimension}; ${name} needs that of a ${columnKinds[name].dimension}.`);
+    return valueProblem(
+      "fluid",
+      `The table's header "${header}" has the unit of a ${found.dimension}; ${name} needs that of a ${columnKinds[name].dimension}.`,
+    );
   }
   return { name, at, header, unit };
 }

@@ -76,7 +76,8 @@ function fill(start: Values): Values {
 }
 
 function solve(relation: Relation, wanted: Name, values: Values): number {
-  const product = (names: readonly Name[]): number => names.filter((name) => name !== wanted).reduce((all, name) => all * (values[name] as number), 1);
+  const product = (names: readonly Name[]): number =>
+    names.filter((name) => name !== wanted).reduce((all, name) => all * (values[name] as number), 1);
   if (relation.left === wanted) return product(relation.times) / product(relation.over);
   const left = values[relation.left] as number;
   if (relation.times.includes(wanted)) return (left * product(relation.over)) / product(relation.times);
@@ -90,7 +91,10 @@ function lackOf(values: Values): string {
 }
 
 /** Where more is given than needed, the derived groups must agree with it. */
-function contradictionIn(given: GivenRow, full: Required<Pick<PropertyRow, "density" | "cp" | "conductivity" | "viscosity">>): Pick<PropertyRow, "contradiction" | "contradicting"> {
+function contradictionIn(
+  given: GivenRow,
+  full: Required<Pick<PropertyRow, "density" | "cp" | "conductivity" | "viscosity">>,
+): Pick<PropertyRow, "contradiction" | "contradicting"> {
   const derived: readonly (readonly [string, number | undefined, number])[] = [
     ["kinematic viscosity", given.kinematicViscosity, full.viscosity / full.density],
     ["Pr", given.Pr, (full.viscosity * full.cp) / full.conductivity],

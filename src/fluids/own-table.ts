@@ -10,7 +10,7 @@ import { type Interpolant, monotone } from "./interpolation.js";
 import { type Column, type ColumnName, columnKinds, columnOf } from "./own-table-columns.js";
 import { completeRow, type PropertyRow } from "./own-table-row.js";
 import { impossible, isBelow, sayTemperature } from "./refusal.js";
-import { coarseness, type Coarseness } from "./table-spacing.js";
+import { type Coarseness, coarseness } from "./table-spacing.js";
 
 export interface OwnTableSettings {
   /** What messages and lists call it; "own table" when absent. */
@@ -18,7 +18,11 @@ export interface OwnTableSettings {
 }
 
 /** The fluid of a table, or everything that is wrong with it. */
-export function ownTable(cells: readonly (readonly unknown[])[], reading: Reading, settings: OwnTableSettings = {}): Fluid | readonly Problem[] {
+export function ownTable(
+  cells: readonly (readonly unknown[])[],
+  reading: Reading,
+  settings: OwnTableSettings = {},
+): Fluid | readonly Problem[] {
   const trimmed = trim(cells);
   const columns = readColumns(trimmed[0] ?? []);
   if (isProblemList(columns)) return columns;
@@ -65,13 +69,18 @@ function readColumns(header: readonly unknown[]): readonly Column[] | readonly P
   const columns: Column[] = [];
   header.forEach((cell, at) => {
     if (isBlank(cell)) return;
-    const column = typeof cell === "string" ? columnOf(cell, at) : valueProblem("fluid", `The table's header ${nameOfColumn(at)} is not text; headers are names with a unit in brackets.`);
+    const column =
+      typeof cell === "string"
+        ? columnOf(cell, at)
+        : valueProblem("fluid", `The table's header ${nameOfColumn(at)} is not text; headers are names with a unit in brackets.`);
     if (isProblem(column)) problems.push(column);
-    else if (columns.some((other) => other.name === column.name)) problems.push(valueProblem("fluid", `The table has two columns for ${column.name}; keep one.`));
+    else if (columns.some((other) => other.name === column.name))
+      problems.push(valueProblem("fluid", `The table has two columns for ${column.name}; keep one.`));
     else columns.push(column);
   });
   if (problems.length > 0) return problems;
-  if (columns.length === 0) return [valueProblem("fluid", 'The table has no header row; its first row must name the columns, such as "temperature [°C]".')];
+  if (columns.length === 0)
+    return [valueProblem("fluid", 'The table has no header row; its first row must name the columns, such as "temperature [°C]".')];
   return columns;
 }
 
@@ -80,7 +89,11 @@ function nameOfColumn(at: number): string {
   return `in column ${at + 1}`;
 }
 
-function readRows(cells: readonly (readonly unknown[])[], columns: readonly Column[], reading: Reading): readonly Row[] | readonly Problem[] {
+function readRows(
+  cells: readonly (readonly unknown[])[],
+  columns: readonly Column[],
+  reading: Reading,
+): readonly Row[] | readonly Problem[] {
   if (cells.length === 0) return [valueProblem("fluid", "The table has headers but no row of values.")];
   const problems: Problem[] = [];
   const single = cells.length === 1;
@@ -99,7 +112,15 @@ function readRows(cells: readonly (readonly unknown[])[], columns: readonly Colu
 }
 
 /** Columns that may stay blank in some rows. */
-const sparse: ReadonlySet<ColumnName> = new Set(["saturation temperature", "latent heat", "surface tension", "vapour density", "vapour cp", "vapour conductivity", "vapour viscosity"]);
+const sparse: ReadonlySet<ColumnName> = new Set([
+  "saturation temperature",
+  "latent heat",
+  "surface tension",
+  "vapour density",
+  "vapour cp",
+  "vapour conductivity",
+  "vapour viscosity",
+]);
 
 function readCell(cell: unknown, column: Column, row: number, reading: Reading, single: boolean): Quantity | Problem | undefined {
   const where = `the table's ${column.name} in row ${row}`;
@@ -113,7 +134,8 @@ function readCell(cell: unknown, column: Column, row: number, reading: Reading, 
   const quantity = readQuantity(cell, kind.dimension, column.unit === undefined ? reading : { ...reading, unit: column.unit }, "fluid");
   if (isProblem(quantity)) return { ...quantity, sentence: `In row ${row} of the table, ${column.name}: ${quantity.sentence}` };
   if (!kind.signed && quantity.value <= 0) return valueProblem("fluid", `${capital(where)} is ${cell}; it must be above zero.`);
-  if (kind.dimension === "temperature" && quantity.value <= 0) return valueProblem("fluid", `${capital(where)} is at or below absolute zero.`);
+  if (kind.dimension === "temperature" && quantity.value <= 0)
+    return valueProblem("fluid", `${capital(where)} is at or below absolute zero.`);
   return quantity;
 }
 
@@ -141,7 +163,13 @@ function inOrder(rows: readonly Row[], columns: readonly Column[]): readonly Row
     const here = ordered[k] as Row;
     const step = temperatureOf(here) - temperatureOf(before);
     const [earlier, later] = rising ? [before, here] : [here, before];
-    if (step === 0) return [valueProblem("fluid", `The table's rows ${earlier.number} and ${later.number} have the same temperature, ${sayTemperature(temperatureOf(here))}; keep one.`)];
+    if (step === 0)
+      return [
+        valueProblem(
+          "fluid",
+          `The table's rows ${earlier.number} and ${later.number} have the same temperature, ${sayTemperature(temperatureOf(here))}; keep one.`,
+        ),
+      ];
     if (step < 0) {
       return [
         valueProblem(
@@ -184,15 +212,22 @@ function solveRows(rows: readonly Row[], columns: readonly Column[]): Solved | r
       expansivity: value("expansivity"),
     });
     if (typeof complete === "string") {
-      problems.push(valueProblem("fluid", `The table is not sufficient: ${complete}. It has ${columns.map((column) => column.name).join(", ")}.`));
+      problems.push(
+        valueProblem("fluid", `The table is not sufficient: ${complete}. It has ${columns.map((column) => column.name).join(", ")}.`),
+      );
       return problems;
     }
     if (complete.contradiction > 0.1) {
       problems.push(
-        valueProblem("fluid", `Row ${row.number} of the table contradicts itself by ${Math.round(100 * complete.contradiction)} %: its ${complete.contradicting} does not follow from its other columns. Check the units.`),
+        valueProblem(
+          "fluid",
+          `Row ${row.number} of the table contradicts itself by ${Math.round(100 * complete.contradiction)} %: its ${complete.contradicting} does not follow from its other columns. Check the units.`,
+        ),
       );
     } else if (complete.contradiction > 0.03) {
-      cautions.push(`Row ${row.number} of the table: ${complete.contradicting} differs by ${Math.round(100 * complete.contradiction)} % from what the other columns give; the others are used.`);
+      cautions.push(
+        `Row ${row.number} of the table: ${complete.contradicting} differs by ${Math.round(100 * complete.contradiction)} % from what the other columns give; the others are used.`,
+      );
     }
     solved.push(complete);
   }
@@ -218,7 +253,9 @@ interface PhaseChange {
   readonly temperature: number;
   readonly latentHeat: number;
   readonly surfaceTension: number | undefined;
-  readonly vapour: { readonly density: number; readonly cp?: number; readonly conductivity?: number; readonly viscosity?: number } | undefined;
+  readonly vapour:
+    | { readonly density: number; readonly cp?: number; readonly conductivity?: number; readonly viscosity?: number }
+    | undefined;
 }
 
 function readPhaseChange(rows: readonly Row[], columns: readonly Column[]): PhaseChange | readonly Problem[] | undefined {
@@ -227,7 +264,12 @@ function readPhaseChange(rows: readonly Row[], columns: readonly Column[]): Phas
   const temperatures = new Set(rows.flatMap((row) => row.values["saturation temperature"]?.value ?? []));
   if (temperatures.size !== 1) {
     const fault = temperatures.size === 0 ? "no saturation temperature" : "several saturation temperatures";
-    return [valueProblem("fluid", `The table has columns for change of phase (${given.join(", ")}) but ${fault}; give one, the same in every row or in one row only.`)];
+    return [
+      valueProblem(
+        "fluid",
+        `The table has columns for change of phase (${given.join(", ")}) but ${fault}; give one, the same in every row or in one row only.`,
+      ),
+    ];
   }
   const temperature = [...temperatures][0] as number;
   const at = (name: ColumnName): number | undefined => valueAt(rows, name, temperature);
@@ -237,7 +279,15 @@ function readPhaseChange(rows: readonly Row[], columns: readonly Column[]): Phas
   const cp = at("vapour cp");
   const conductivity = at("vapour conductivity");
   const viscosity = at("vapour viscosity");
-  const vapour = density === undefined ? undefined : { density, ...(cp !== undefined && { cp }), ...(conductivity !== undefined && { conductivity }), ...(viscosity !== undefined && { viscosity }) };
+  const vapour =
+    density === undefined
+      ? undefined
+      : {
+          density,
+          ...(cp !== undefined && { cp }),
+          ...(conductivity !== undefined && { conductivity }),
+          ...(viscosity !== undefined && { viscosity }),
+        };
   return { temperature, latentHeat, surfaceTension: at("surface tension"), vapour };
 }
 
@@ -298,7 +348,9 @@ const anyPressure = [1e-6, 1e12] as const;
 function fluidOf(solved: Solved, change: PhaseChange | undefined, name: string, tolerance: (column: ColumnName) => number): Fluid {
   const curves = curvesOf(solved);
   const single = solved.rows.length === 1;
-  const limits = single ? anyTemperature : ([solved.temperatures[0] as number, solved.temperatures[solved.temperatures.length - 1] as number] as const);
+  const limits = single
+    ? anyTemperature
+    : ([solved.temperatures[0] as number, solved.temperatures[solved.temperatures.length - 1] as number] as const);
   const coarse = single ? undefined : coarseness(solved.temperatures, solved.rows);
   const refusal = (T: number, p: number): Problem | undefined => impossible(T, p) ?? outsideRows(name, limits, T);
   const liquidState = (T: number, p: number): State => stateFrom(curves, T, p, change ? "liquid" : phaseOf(curves, T, solved.densityGiven));

@@ -6,7 +6,14 @@
 import { coverageProblem, type Problem } from "../quantities/problems.js";
 import { horner } from "./fit.js";
 import type { Fluid, FluidRange, State, Uncertainty } from "./fluid.js";
-import { density as densityFit, heatCapacity, saline, salinityUnit, vapourPressure, viscosity as viscosityFit } from "./records/seawater.js";
+import {
+  density as densityFit,
+  heatCapacity,
+  saline,
+  salinityUnit,
+  vapourPressure,
+  viscosity as viscosityFit,
+} from "./records/seawater.js";
 import { impossible, isBelow, outside, sayPressure, sayTemperature } from "./refusal.js";
 import type { ShelfEntry } from "./shelf-entry.js";
 import { liquidState } from "./water-equations.js";
@@ -84,7 +91,12 @@ function engineeringDensity(t: number, p: number, S: number): number {
 
 function engineeringCp(t: number, p: number, S: number): number {
   const T68 = 1.00024 * (t + zeroCelsius);
-  const atReference = 1000 * horner(heatCapacity.temperature.map((row) => horner(row, S)), T68);
+  const atReference =
+    1000 *
+    horner(
+      heatCapacity.temperature.map((row) => horner(row, S)),
+      T68,
+    );
   const slope = horner(heatCapacity.pressure, t) + S * horner(heatCapacity.pressureSalinity, t);
   return atReference + (p / 1e6 - referencePressure(t, S)) * slope;
 }
@@ -107,7 +119,9 @@ function viscosityOf(t: number, S: number): number {
 function conductivityOf(t: number, S: number): number {
   const T = 1.00024 * t + zeroCelsius;
   const Sp = S / 1.00472;
-  const exponent = Math.log10(240 + 2e-4 * Sp) + 0.434 * (2.3 - (343.5 + 0.037 * Sp) / T) * Math.cbrt(1 - T / (647.3 + 0.03 * Sp));
+  // The paper prints log₁₀ e with three digits, and 2.3 to match; the exact constant would raise k by 0.07 %.
+  const printed = 434 / 1000;
+  const exponent = Math.log10(240 + 2e-4 * Sp) + printed * (2.3 - (343.5 + 0.037 * Sp) / T) * Math.cbrt(1 - T / (647.3 + 0.03 * Sp));
   return 1e-3 * 10 ** exponent;
 }
 
@@ -148,13 +162,19 @@ function seawaterOf(percent: number): Fluid {
     const nonsense = impossible(T, p);
     if (nonsense) return nonsense;
     if (isBelow(T, freezingPoint)) {
-      return coverageProblem(undefined, `${name} freezes at ${sayTemperature(Math.round(100 * freezingPoint) / 100)}; ${sayTemperature(T)} is below it.`);
+      return coverageProblem(
+        undefined,
+        `${name} freezes at ${sayTemperature(Math.round(100 * freezingPoint) / 100)}; ${sayTemperature(T)} is below it.`,
+      );
     }
     const out = outside(name, range, T, p);
     if (out) return out;
     const boiling = vapourPressureOf(T, S);
     if (!isBelow(p, boiling)) return undefined;
-    return coverageProblem(undefined, `${name} at ${sayTemperature(T)} boils below ${sayPressure(Number(boiling.toPrecision(4)))} absolute; ${sayPressure(p)} was given. Raise the pressure.`);
+    return coverageProblem(
+      undefined,
+      `${name} at ${sayTemperature(T)} boils below ${sayPressure(Number(boiling.toPrecision(4)))} absolute; ${sayPressure(p)} was given. Raise the pressure.`,
+    );
   };
   const state = (T: number, p: number): State | Problem => refusal(T, p) ?? stateAt(T, p, S);
   return {
@@ -170,7 +190,8 @@ function seawaterOf(percent: number): Fluid {
     state,
     density: (T, p) => refusal(T, p) ?? thermal(T, p, S).density,
     uncertainty: (T, p) => uncertaintyAt(T, p, S),
-    cautions: (T) => (T > zeroCelsius + 80 ? ["Hot seawater lays down scale and corrodes; the film coefficient is of the clean surface."] : []),
+    cautions: (T) =>
+      T > zeroCelsius + 80 ? ["Hot seawater lays down scale and corrodes; the film coefficient is of the clean surface."] : [],
   };
 }
 
@@ -200,7 +221,15 @@ function uncertaintyAt(T: number, p: number, S: number): Uncertainty {
   return p > 1e6 ? pressed : hot;
 }
 
-const sources = ["iapws-r13-08", "iapws-r7-97", "sharqawy-2010", "nayar-2016", "jamieson-1969", "jamieson-tudhope-1970", "millero-1978"] as const;
+const sources = [
+  "iapws-r13-08",
+  "iapws-r7-97",
+  "sharqawy-2010",
+  "nayar-2016",
+  "jamieson-1969",
+  "jamieson-tudhope-1970",
+  "millero-1978",
+] as const;
 
 export const seawater: ShelfEntry = {
   name: "seawater",

@@ -11,11 +11,23 @@ import { nearMisses } from "./near-miss.js";
 import { pureFluids } from "./records/pure/index.js";
 import { waterEntry } from "./records/water-entry.js";
 import { seawater } from "./seawater.js";
+import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 import { siliconeOils } from "./silicone-oil.js";
 import { tableLiquids } from "./table-liquids.js";
-import type { Basis, NameParameter, ShelfEntry } from "./shelf-entry.js";
 
-const entries: readonly ShelfEntry[] = [waterEntry, ...pureFluids, ...coolants, seawater, ...tableLiquids, ...mineralOils, siliconeOils, ...heatTransferLiquids, ...liquidMetals, humidAirEntry, ...gasEntries];
+const entries: readonly ShelfEntry[] = [
+  waterEntry,
+  ...pureFluids,
+  ...coolants,
+  seawater,
+  ...tableLiquids,
+  ...mineralOils,
+  siliconeOils,
+  ...heatTransferLiquids,
+  ...liquidMetals,
+  humidAirEntry,
+  ...gasEntries,
+];
 
 /** Every entry, in the order of the list. */
 export function shelf(): readonly ShelfEntry[] {
@@ -53,10 +65,7 @@ function search(text: string): Fluid | Problem {
 function buildPlain(entry: ShelfEntry, text: string): Fluid | Problem {
   const { parameter } = entry;
   if (!parameter || parameter.otherwise !== undefined) return entry.fluid(parameter?.otherwise);
-  return valueProblem(
-    "fluid",
-    `"${text}" needs its ${parameter.meaning}, ${spanOf(parameter)}: write for example "${exampleOf(entry)}".`,
-  );
+  return valueProblem("fluid", `"${text}" needs its ${parameter.meaning}, ${spanOf(parameter)}: write for example "${exampleOf(entry)}".`);
 }
 
 function buildParametrised(entry: ShelfEntry, asked: Parametrised): Fluid | Problem {
@@ -82,9 +91,13 @@ function unitFault(entry: ShelfEntry, parameter: NameParameter, asked: Parametri
     const wanted = bases.length > 0 ? `is counted by ${bases.join(" or ")}` : "takes no basis";
     return valueProblem("fluid", `"${asked.text}": ${entry.name} ${wanted}; write "${exampleOf(entry)}".`);
   }
-  const fits = asked.unit === "" || asked.unit === parameter.unit || (asked.unit === "g/kg" && parameter.unit === "%" && parameter.perMille === true);
+  const fits =
+    asked.unit === "" || asked.unit === parameter.unit || (asked.unit === "g/kg" && parameter.unit === "%" && parameter.perMille === true);
   if (fits) return undefined;
-  return valueProblem("fluid", `"${asked.text}": the ${parameter.meaning} of ${entry.name} is given in ${parameter.unit || "plain numbers"}; write "${exampleOf(entry)}".`);
+  return valueProblem(
+    "fluid",
+    `"${asked.text}": the ${parameter.meaning} of ${entry.name} is given in ${parameter.unit || "plain numbers"}; write "${exampleOf(entry)}".`,
+  );
 }
 
 function spanOf(parameter: NameParameter): string {
@@ -107,7 +120,10 @@ function unknown(text: string): Problem {
   const near = nearMisses(asked && asked.unit !== "" ? asked.name : text, entries);
   const shown = near.map((entry) => `"${entry.parameter && entry.parameter.otherwise === undefined ? exampleOf(entry) : entry.name}"`);
   const hint = shown.length > 0 ? ` Did you mean ${shown.join(" or ")}?` : "";
-  return valueProblem("fluid", `No fluid is called "${text}".${hint} =FILM.LIST("fluids") lists them all; a property table of your own serves too.`);
+  return valueProblem(
+    "fluid",
+    `No fluid is called "${text}".${hint} =FILM.LIST("fluids") lists them all; a property table of your own serves too.`,
+  );
 }
 
 interface Parametrised {
@@ -134,7 +150,13 @@ function parseParametrised(text: string): Parametrised | undefined {
   return undefined;
 }
 
-function parametrised(text: string, name: string, amount: string, unitText: string | undefined, basisText: string | undefined): Parametrised {
+function parametrised(
+  text: string,
+  name: string,
+  amount: string,
+  unitText: string | undefined,
+  basisText: string | undefined,
+): Parametrised {
   const basis = basisOf(basisText);
   const parsed = { text, name: name.trim(), amount: Number(amount.replace(",", ".")), unit: unitOf(unitText) };
   return basis ? { ...parsed, basis } : parsed;
@@ -183,7 +205,9 @@ function byName(): ReadonlyMap<string, ShelfEntry> {
 let indexWithNumber: Map<string, ShelfEntry> | undefined;
 
 function byNameWithNumber(): ReadonlyMap<string, ShelfEntry> {
-  indexWithNumber ??= new Map(entries.flatMap((entry) => (entry.parameter?.namesWithNumber ?? []).map((name) => [keyOf(name), entry] as const)));
+  indexWithNumber ??= new Map(
+    entries.flatMap((entry) => (entry.parameter?.namesWithNumber ?? []).map((name) => [keyOf(name), entry] as const)),
+  );
   return indexWithNumber;
 }
 

@@ -2,7 +2,7 @@
  * Silicone oil (polydimethylsiloxane) by its grade, the kinematic viscosity at 25 °C in mm²/s: typical values between the printed grades.
  */
 import { numerical, polynomial } from "./fit.js";
-import { fittedLiquid, fitPressureRange } from "./fitted-liquid.js";
+import { fitPressureRange, fittedLiquid } from "./fitted-liquid.js";
 import type { Fluid, Uncertainty } from "./fluid.js";
 import { monotone } from "./interpolation.js";
 import type { ShelfEntry } from "./shelf-entry.js";
@@ -27,7 +27,11 @@ const sources = ["silicone-typical-values"] as const;
 
 function siliconeOil(grade: number): Fluid {
   const logs = grades.map((row) => Math.log(row[0]));
-  const of = (column: 1 | 2 | 3 | 4 | 5 | 6): number => monotone(logs, grades.map((row) => row[column])).at(Math.log(grade));
+  const of = (column: 1 | 2 | 3 | 4 | 5 | 6): number =>
+    monotone(
+      logs,
+      grades.map((row) => row[column]),
+    ).at(Math.log(grade));
   const density25 = of(1);
   const beta = of(2);
   const density = numerical((T) => density25 / (1 + beta * (T - zeroCelsius - 25)));

@@ -1,7 +1,7 @@
 /** Liquids known by a handbook's table: monotone interpolation between its rows, viscosity in its logarithm. */
 import type { WorkKey } from "../bibliography.js";
 import { type Curve, exponentialOf } from "./fit.js";
-import { fittedLiquid, fitPressureRange } from "./fitted-liquid.js";
+import { fitPressureRange, fittedLiquid } from "./fitted-liquid.js";
 import type { Uncertainty } from "./fluid.js";
 import { monotone } from "./interpolation.js";
 import type { ShelfEntry } from "./shelf-entry.js";
@@ -84,7 +84,11 @@ export const tableLiquids: readonly ShelfEntry[] = liquids.map((liquid) => {
     uncertainty: "density 0.5 %, cp 2 %, viscosity 10 %, conductivity 5 %",
     fluid: () => {
       const temperatures = liquid.rows.map((row) => row[0]);
-      const through = (column: 1 | 2 | 4): Curve => monotone(temperatures, liquid.rows.map((row) => row[column]));
+      const through = (column: 1 | 2 | 4): Curve =>
+        monotone(
+          temperatures,
+          liquid.rows.map((row) => row[column]),
+        );
       return fittedLiquid({
         name: liquid.name,
         synonyms: liquid.synonyms,
@@ -93,7 +97,12 @@ export const tableLiquids: readonly ShelfEntry[] = liquids.map((liquid) => {
         T,
         density: through(1),
         cp: through(2),
-        viscosity: exponentialOf(monotone(temperatures, liquid.rows.map((row) => Math.log(row[3])))),
+        viscosity: exponentialOf(
+          monotone(
+            temperatures,
+            liquid.rows.map((row) => Math.log(row[3])),
+          ),
+        ),
         conductivity: through(4),
         expansivity: liquid.expansivity,
         uncertainty: usual,

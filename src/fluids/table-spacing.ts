@@ -23,7 +23,8 @@ const weighed = Object.keys(weights) as readonly Weighed[];
 const gain = 4;
 
 export function coarseness(temperatures: readonly number[], rows: readonly PropertyRow[]): Coarseness {
-  const errors = temperatures.length === 2 ? [twoRowErrors(rows)] : rows.slice(1, -1).map((_, k) => leftOutErrors(temperatures, rows, k + 1));
+  const errors =
+    temperatures.length === 2 ? [twoRowErrors(rows)] : rows.slice(1, -1).map((_, k) => leftOutErrors(temperatures, rows, k + 1));
   const largest = (name: Weighed): number => Math.max(...errors.map((error) => error[name]));
   const inH = errors.map((error) => Math.hypot(...weighed.map((name) => weights[name] * error[name])));
   const worst = Math.max(...inH);

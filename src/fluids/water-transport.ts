@@ -2,7 +2,7 @@
  * Transport of water and steam: viscosity IAPWS R12-08, thermal conductivity IAPWS R15-11, surface tension IAPWS R1-76(2014).
  * Kelvin, kg/m³; the caller tests the releases' ranges.
  */
-import { conductivity, constants, surfaceTension, viscosity, type Term } from "./records/water.js";
+import { conductivity, constants, surfaceTension, type Term, viscosity } from "./records/water.js";
 
 /** Upper limit of both transport releases at the pressures of the industrial formulation, K. */
 export const transportLimit = 1173.15;

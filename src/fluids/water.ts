@@ -186,7 +186,9 @@ function uncertainty(T: number, p: number): Uncertainty {
 function cautions(T: number, p: number): readonly string[] {
   const said: string[] = [];
   if (nearCritical(T, p)) {
-    said.push("Close to water's critical point properties change steeply and heat transfer can deteriorate; ordinary equations do not hold here.");
+    said.push(
+      "Close to water's critical point properties change steeply and heat transfer can deteriorate; ordinary equations do not hold here.",
+    );
   }
   if (T > transportLimit) said.push("The releases for viscosity and conductivity of steam end at 900 °C; none is given here.");
   if (p > 1e6 || (T > 373.15 && isLiquid(T, p))) {

@@ -11,7 +11,7 @@ function sure<T extends object | number>(thing: T | Problem | undefined): T {
   return thing as T;
 }
 
-const rows = readCsv("humid-air-states.csv").map((row) => [row["fluid"] as string, row["t_C"] as string, row["p_Pa"] as string, row] as const);
+const rows = readCsv("humid-air-states.csv").map((row) => [row.fluid as string, row.t_C as string, row.p_Pa as string, row] as const);
 
 describe("against a virial real-gas model", () => {
   test.each(rows)("%s at %s °C, %s Pa", (name, _t, _p, row) => {
@@ -27,12 +27,15 @@ describe("against a virial real-gas model", () => {
     }
   });
 
-  test.each(rows.filter(([name, , , row]) => name !== "humid air 0 %" && /dew point/.test(row["note"] as string)))("dew point of %s at %s °C, %s Pa", (name, _t, _p, row) => {
-    const T = (numberIn(row, "t_C") as number) + 273.15;
-    const printed = Number(/dew point (-?[\d.]+) C/.exec(row["note"] as string)?.[1]);
-    const dew = sure(sure(findFluid(name)).dewPoint?.(T, numberIn(row, "p_Pa") as number));
-    expect(Math.abs(dew - 273.15 - printed)).toBeLessThan(0.03);
-  });
+  test.each(rows.filter(([name, , , row]) => name !== "humid air 0 %" && /dew point/.test(row.note as string)))(
+    "dew point of %s at %s °C, %s Pa",
+    (name, _t, _p, row) => {
+      const T = (numberIn(row, "t_C") as number) + 273.15;
+      const printed = Number(/dew point (-?[\d.]+) C/.exec(row.note as string)?.[1]);
+      const dew = sure(sure(findFluid(name)).dewPoint?.(T, numberIn(row, "p_Pa") as number));
+      expect(Math.abs(dew - 273.15 - printed)).toBeLessThan(0.03);
+    },
+  );
 });
 
 describe("moisture", () => {

@@ -39,21 +39,22 @@ function tolerancesOf(note: string, hot: boolean): Tolerances {
 }
 
 describe("rows of the published fits", () => {
-  test.each(
-    readCsv("liquid-states.csv").map((row) => [row["fluid"] as string, row["t_C"] as string, row["p_Pa"] as string, row] as const),
-  )("%s at %s °C, %s Pa", (name, _t, _p, row) => {
-    const t = numberIn(row, "t_C") as number;
-    const found = stateOf(name, t + 273.15, numberIn(row, "p_Pa") as number);
-    const tolerances = tolerancesOf(row["note"] as string, t >= 80 || name === "seawater 12 %");
-    for (const quantity of Object.keys(tolerances) as readonly (keyof Tolerances)[]) {
-      const expected = numberIn(row, quantity);
-      if (expected === undefined) continue;
-      const value = found[quantity] as number;
-      // Expansivity near a density maximum is judged by its size elsewhere.
-      const scale = quantity === "expansivity" ? Math.max(Math.abs(expected), 5e-5) : Math.abs(expected);
-      expect(Math.abs(value - expected) / scale, `${quantity}: ${value} for ${expected}`).toBeLessThan(tolerances[quantity]);
-    }
-  });
+  test.each(readCsv("liquid-states.csv").map((row) => [row.fluid as string, row.t_C as string, row.p_Pa as string, row] as const))(
+    "%s at %s °C, %s Pa",
+    (name, _t, _p, row) => {
+      const t = numberIn(row, "t_C") as number;
+      const found = stateOf(name, t + 273.15, numberIn(row, "p_Pa") as number);
+      const tolerances = tolerancesOf(row.note as string, t >= 80 || name === "seawater 12 %");
+      for (const quantity of Object.keys(tolerances) as readonly (keyof Tolerances)[]) {
+        const expected = numberIn(row, quantity);
+        if (expected === undefined) continue;
+        const value = found[quantity] as number;
+        // Expansivity near a density maximum is judged by its size elsewhere.
+        const scale = quantity === "expansivity" ? Math.max(Math.abs(expected), 5e-5) : Math.abs(expected);
+        expect(Math.abs(value - expected) / scale, `${quantity}: ${value} for ${expected}`).toBeLessThan(tolerances[quantity]);
+      }
+    },
+  );
 });
 
 describe("seawater", () => {
@@ -148,7 +149,7 @@ describe("oils", () => {
     [460, 30.2],
   ])("ISO VG %d has about %d mm²/s at 100 °C", (grade, at100) => {
     const found = stateOf(`gear oil ${grade}`, 373.15, 101325);
-    expect(Math.abs(((found.viscosity as number) / found.density) * 1e6 / at100 - 1)).toBeLessThan(0.02);
+    expect(Math.abs((((found.viscosity as number) / found.density) * 1e6) / at100 - 1)).toBeLessThan(0.02);
     const at40 = stateOf(`gear oil ISO VG ${grade}`, 313.15, 101325);
     expect(((at40.viscosity as number) / at40.density) * 1e6).toBeCloseTo(grade, 6);
   });
@@ -187,7 +188,16 @@ describe("oils", () => {
   });
 
   test("contradictory sheets are refused", () => {
-    const sheet = { name: "oil", viscosity40: 10, viscosity100: 12, density15: 880, flashPoint: 200, T: [273, 400] as const, sources: [], viscosityUncertainty: 0.1 };
+    const sheet = {
+      name: "oil",
+      viscosity40: 10,
+      viscosity100: 12,
+      density15: 880,
+      flashPoint: 200,
+      T: [273, 400] as const,
+      sources: [],
+      viscosityUncertainty: 0.1,
+    };
     expect(isProblem(mineralOil(sheet))).toBe(true);
     expect(isProblem(mineralOil({ ...sheet, viscosity100: 3, density15: 8 }))).toBe(true);
     expect(isProblem(mineralOil({ ...sheet, viscosity100: 3 }))).toBe(false);
@@ -198,27 +208,30 @@ describe("laws", () => {
   const families = ["coolant", "oil", "metal or salt"];
   const entries = shelf().filter((entry) => families.includes(entry.family));
 
-  test.each(entries.map((entry) => [entry.name, entry] as const))("%s is finite, positive and consistent over its range", (_name, entry) => {
-    fc.assert(
-      fc.property(fc.double({ min: 0, max: 1, noNaN: true }), fc.double({ min: 0, max: 1, noNaN: true }), (u, v) => {
-        const [least, most] = entry.parameter?.limits ?? [0, 0];
-        const fluid = entry.fluid(entry.parameter ? least + v * (most - least) : undefined);
-        if (isProblem(fluid)) throw new Error(fluid.sentence);
-        const [coldest, hottest] = fluid.range.T;
-        const T = coldest + u * (hottest - coldest);
-        const found = fluid.state(T, 5e6);
-        if (isProblem(found)) throw new Error(found.sentence);
-        const all = [found.density, found.cp, found.viscosity as number, found.conductivity as number];
-        expect(Math.min(...all)).toBeGreaterThan(0);
-        expect(all.every(Number.isFinite)).toBe(true);
-        const step = 1e-3;
-        if (T - step < coldest || T + step > hottest) return;
-        const slope = ((fluid.density(T + step, 5e6) as number) - (fluid.density(T - step, 5e6) as number)) / (2 * step);
-        // A handbook's table prints expansivity to two digits in a column of its own, beside its densities.
-        const tabled = fluid.sources.includes("incropera-a5");
-        expect(Math.abs(-slope / found.density - (found.expansivity as number))).toBeLessThan(tabled ? 2e-4 : 1e-6);
-      }),
-      { numRuns: 200 },
-    );
-  });
+  test.each(entries.map((entry) => [entry.name, entry] as const))(
+    "%s is finite, positive and consistent over its range",
+    (_name, entry) => {
+      fc.assert(
+        fc.property(fc.double({ min: 0, max: 1, noNaN: true }), fc.double({ min: 0, max: 1, noNaN: true }), (u, v) => {
+          const [least, most] = entry.parameter?.limits ?? [0, 0];
+          const fluid = entry.fluid(entry.parameter ? least + v * (most - least) : undefined);
+          if (isProblem(fluid)) throw new Error(fluid.sentence);
+          const [coldest, hottest] = fluid.range.T;
+          const T = coldest + u * (hottest - coldest);
+          const found = fluid.state(T, 5e6);
+          if (isProblem(found)) throw new Error(found.sentence);
+          const all = [found.density, found.cp, found.viscosity as number, found.conductivity as number];
+          expect(Math.min(...all)).toBeGreaterThan(0);
+          expect(all.every(Number.isFinite)).toBe(true);
+          const step = 1e-3;
+          if (T - step < coldest || T + step > hottest) return;
+          const slope = ((fluid.density(T + step, 5e6) as number) - (fluid.density(T - step, 5e6) as number)) / (2 * step);
+          // A handbook's table prints expansivity to two digits in a column of its own, beside its densities.
+          const tabled = fluid.sources.includes("incropera-a5");
+          expect(Math.abs(-slope / found.density - (found.expansivity as number))).toBeLessThan(tabled ? 2e-4 : 1e-6);
+        }),
+        { numRuns: 200 },
+      );
+    },
+  );
 });

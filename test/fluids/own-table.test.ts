@@ -42,11 +42,27 @@ describe("any sufficient set of columns gives the same fluid", () => {
     ["kinematic viscosity", ["density [kg/m3]", "cp [J/(kg·K)]", "conductivity [W/(m·K)]", "kinematic viscosity [m²/s]"], [rho, cp, k, nu]],
     ["Pr for cp", ["density [kg/m3]", "Pr", "conductivity [W/(m·K)]", "viscosity [Pa·s]"], [rho, Pr, k, mu]],
     ["diffusivity for cp", ["density [kg/m3]", "diffusivity [m²/s]", "conductivity [W/(m·K)]", "viscosity [Pa·s]"], [rho, alpha, k, mu]],
-    ["diffusivity and Pr for viscosity and cp", ["density [kg/m3]", "diffusivity [m²/s]", "conductivity [W/(m·K)]", "Pr"], [rho, alpha, k, Pr]],
-    ["density from both viscosities", ["viscosity [Pa·s]", "kinematic viscosity [m²/s]", "conductivity [W/(m·K)]", "cp [J/(kg·K)]"], [mu, nu, k, cp]],
-    ["density from diffusivity", ["cp [J/(kg·K)]", "diffusivity [m²/s]", "conductivity [W/(m·K)]", "kinematic viscosity [m²/s]"], [cp, alpha, k, nu]],
+    [
+      "diffusivity and Pr for viscosity and cp",
+      ["density [kg/m3]", "diffusivity [m²/s]", "conductivity [W/(m·K)]", "Pr"],
+      [rho, alpha, k, Pr],
+    ],
+    [
+      "density from both viscosities",
+      ["viscosity [Pa·s]", "kinematic viscosity [m²/s]", "conductivity [W/(m·K)]", "cp [J/(kg·K)]"],
+      [mu, nu, k, cp],
+    ],
+    [
+      "density from diffusivity",
+      ["cp [J/(kg·K)]", "diffusivity [m²/s]", "conductivity [W/(m·K)]", "kinematic viscosity [m²/s]"],
+      [cp, alpha, k, nu],
+    ],
     ["conductivity from Pr", ["density [kg/m3]", "cp [J/(kg·K)]", "Pr", "viscosity [Pa·s]"], [rho, cp, Pr, mu]],
-    ["other units", ["density [lb/ft3]", "cp [kJ/(kg·K)]", "conductivity [mW/(m·K)]", "viscosity [cP]"], [rho / 16.01846337396014, cp / 1000, k * 1000, mu * 1000]],
+    [
+      "other units",
+      ["density [lb/ft3]", "cp [kJ/(kg·K)]", "conductivity [mW/(m·K)]", "viscosity [cP]"],
+      [rho / 16.01846337396014, cp / 1000, k * 1000, mu * 1000],
+    ],
     ["symbols", ["ρ [kg/m³]", "c_p (J/kg/K)", "λ [W/mK]", "μ [mPa·s]"], [rho, cp, k, mu * 1000]],
   ])("%s", (_name, headers, values) => {
     const fluid = tableOf([
@@ -84,13 +100,22 @@ describe("any sufficient set of columns gives the same fluid", () => {
     [["density", "conductivity", "viscosity"], /cp \(or Pr, or diffusivity\) is missing/],
     [["kinematic viscosity", "conductivity"], /cp \(or Pr, or diffusivity\) is missing/],
   ])("%j is not sufficient", (headers, fault) => {
-    expect(faultOf([["temperature", ...headers], [20, ...headers.map(() => 1)]])).toMatch(fault);
+    expect(
+      faultOf([
+        ["temperature", ...headers],
+        [20, ...headers.map(() => 1)],
+      ]),
+    ).toMatch(fault);
   });
 
   test("columns that contradict each other are refused, small differences of rounding are said", () => {
     const headers = ["temperature", "density", "cp", "conductivity", "viscosity", "Pr"];
     expect(faultOf([headers, [20, rho, cp, k, mu, 1000 * Pr]])).toMatch(/contradicts itself.*Check the units/);
-    expect(tableOf([headers, [20, rho, cp, k, mu, 1.05 * Pr]]).cautions(300, 1e5).join()).toMatch(/Pr differs by 5 %/);
+    expect(
+      tableOf([headers, [20, rho, cp, k, mu, 1.05 * Pr]])
+        .cautions(300, 1e5)
+        .join(),
+    ).toMatch(/Pr differs by 5 %/);
     expect(tableOf([headers, [20, rho, cp, k, mu, 1.01 * Pr]]).cautions(300, 1e5)).toEqual([]);
   });
 });
@@ -181,11 +206,29 @@ describe("faults are sentences that name the cell", () => {
     ["a truth value", [headers, row(10, true)], /A number is needed/],
     ["words in a cell", [headers, row(10, "heavy")], /In row 2 of the table, density/],
     ["another dimension in a cell", [headers, row(10, "3 m/s")], /In row 2 of the table, density.*speed/],
-    ["an unknown header", [[...headers, "colour"], [...row(10), 1]], /header "colour" is not known; headers are temperature, density/],
+    [
+      "an unknown header",
+      [
+        [...headers, "colour"],
+        [...row(10), 1],
+      ],
+      /header "colour" is not known; headers are temperature, density/,
+    ],
     ["an unknown unit", [["temperature [°C]", "density [blobs]", "cp", "conductivity", "viscosity"], row(10)], /density \[blobs\]/],
-    ["a unit of another kind", [["temperature [°C]", "density [m/s]", "cp", "conductivity", "viscosity"], row(10)], /unit of a speed; density needs that of a density/],
+    [
+      "a unit of another kind",
+      [["temperature [°C]", "density [m/s]", "cp", "conductivity", "viscosity"], row(10)],
+      /unit of a speed; density needs that of a density/,
+    ],
     ["a unit for Pr", [["temperature [°C]", "density", "Pr [W]", "conductivity", "viscosity"], row(10)], /pure number/],
-    ["two columns of one kind", [[...headers, "rho"], [...row(10), 1]], /two columns for density/],
+    [
+      "two columns of one kind",
+      [
+        [...headers, "rho"],
+        [...row(10), 1],
+      ],
+      /two columns for density/,
+    ],
     ["no rows", [headers], /no row of values/],
     ["nothing", [[]], /no header row/],
     ["several rows without temperature", [headers.slice(1), row(10).slice(1), row(20).slice(1)], /needs a column "temperature"/],
@@ -259,7 +302,16 @@ describe("gas or liquid", () => {
 
 describe("change of phase", () => {
   // Water at 1 atm; Incropera et al., table A.6, from memory.
-  const headers = ["temperature [°C]", "density", "cp", "conductivity", "viscosity", "saturation temperature [°C]", "latent heat [kJ/kg]", "surface tension [N/m]"];
+  const headers = [
+    "temperature [°C]",
+    "density",
+    "cp",
+    "conductivity",
+    "viscosity",
+    "saturation temperature [°C]",
+    "latent heat [kJ/kg]",
+    "surface tension [N/m]",
+  ];
   const row = [100, 957.9, 4217, 0.68, 279e-6, 100, 2257, 0.0589];
   const vapourHeaders = ["vapour density", "vapour cp", "vapour conductivity", "vapour viscosity"];
   const vapour = [0.5955, 2029, 0.0248, 12.02e-6];
@@ -298,7 +350,14 @@ describe("change of phase", () => {
   });
 
   test.each<readonly [string, Cells, RegExp]>([
-    ["no saturation temperature", [["temperature", "density", "cp", "conductivity", "viscosity", "latent heat [kJ/kg]"], [100, 958, 4217, 0.68, 279e-6, 2257]], /no saturation temperature/],
+    [
+      "no saturation temperature",
+      [
+        ["temperature", "density", "cp", "conductivity", "viscosity", "latent heat [kJ/kg]"],
+        [100, 958, 4217, 0.68, 279e-6, 2257],
+      ],
+      /no saturation temperature/,
+    ],
     ["no latent heat", [headers.slice(0, 6), row.slice(0, 6)], /"latent heat"/],
     ["two saturation temperatures", [headers, row, [120, 943, 4245, 0.683, 232e-6, 120, 2200, 0.055]], /several saturation temperatures/],
   ])("%s", (_name, cells, fault) => {
@@ -310,19 +369,43 @@ describe("robustness", () => {
   const cell = fc.oneof(
     fc.double(),
     fc.string({ maxLength: 8 }),
-    fc.constantFrom("temperature [°C]", "density", "cp", "conductivity", "viscosity", "Pr", "nu", "20 °C", "1 ± 2", "", null, undefined, true, 0, 20, 1e308, "#N/A", { type: "Error" }),
+    fc.constantFrom(
+      "temperature [°C]",
+      "density",
+      "cp",
+      "conductivity",
+      "viscosity",
+      "Pr",
+      "nu",
+      "20 °C",
+      "1 ± 2",
+      "",
+      null,
+      undefined,
+      true,
+      0,
+      20,
+      1e308,
+      "#N/A",
+      { type: "Error" },
+    ),
   );
   test("any cells give a fluid or sentences, and a fluid gives numbers or sentences", () => {
     fc.assert(
-      fc.property(fc.array(fc.array(cell, { maxLength: 7 }), { maxLength: 6 }), fc.double({ min: 200, max: 600, noNaN: true }), (cells, T) => {
-        const found = ownTable(cells, si);
-        if (Array.isArray(found)) {
-          expect((found as readonly Problem[]).every((one) => one.sentence.length > 0)).toBe(true);
-          return;
-        }
-        const state = (found as Fluid).state(T, 1e5);
-        if (!isProblem(state)) expect([state.density, state.cp, state.conductivity, state.viscosity].every((value) => Number.isFinite(value))).toBe(true);
-      }),
+      fc.property(
+        fc.array(fc.array(cell, { maxLength: 7 }), { maxLength: 6 }),
+        fc.double({ min: 200, max: 600, noNaN: true }),
+        (cells, T) => {
+          const found = ownTable(cells, si);
+          if (Array.isArray(found)) {
+            expect((found as readonly Problem[]).every((one) => one.sentence.length > 0)).toBe(true);
+            return;
+          }
+          const state = (found as Fluid).state(T, 1e5);
+          if (!isProblem(state))
+            expect([state.density, state.cp, state.conductivity, state.viscosity].every((value) => Number.isFinite(value))).toBe(true);
+        },
+      ),
       { numRuns: 3000 },
     );
   });
@@ -331,11 +414,20 @@ describe("robustness", () => {
     const positive = fc.double({ min: 1e-300, max: 1e300, noNaN: true });
     fc.assert(
       fc.property(positive, positive, positive, positive, (a, b, c, d) => {
-        const found = ownTable([["temperature", "density", "cp", "conductivity", "viscosity"], [20, a, b, c, d], [30, d, c, b, a]], si);
+        const found = ownTable(
+          [
+            ["temperature", "density", "cp", "conductivity", "viscosity"],
+            [20, a, b, c, d],
+            [30, d, c, b, a],
+          ],
+          si,
+        );
         if (Array.isArray(found)) return;
         const state = (found as Fluid).state(295.15, 1e5);
         if (!isProblem(state)) {
-          expect([state.density, state.cp, state.conductivity, state.viscosity, state.expansivity].every((value) => Number.isFinite(value))).toBe(true);
+          expect(
+            [state.density, state.cp, state.conductivity, state.viscosity, state.expansivity].every((value) => Number.isFinite(value)),
+          ).toBe(true);
         }
       }),
       { numRuns: 2000 },

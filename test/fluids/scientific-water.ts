@@ -126,7 +126,8 @@ function residual(d: Jet, t: Jet): Jet {
   const tSquare = times(tOff, tOff);
   let sum = constant(0);
   for (const [i, j, n] of polynomial) sum = add(sum, scaled(times(power(d, i), power(t, j)), n));
-  for (const [c, i, j, n] of damped) sum = add(sum, scaled(times(times(power(d, i), power(t, j)), exponential(scaled(power(d, c), -1))), n));
+  for (const [c, i, j, n] of damped)
+    sum = add(sum, scaled(times(times(power(d, i), power(t, j)), exponential(scaled(power(d, c), -1))), n));
   for (const [j, n, beta, gamma] of bells) {
     const off = add(t, constant(-gamma));
     const exponent = add(scaled(dSquare, -20), scaled(times(off, off), -beta));

@@ -83,28 +83,37 @@ describe("names", () => {
 
   test("any text is a fluid or a sentence", () => {
     fc.assert(
-      fc.property(fc.oneof(fc.string({ maxLength: 40 }), fc.constantFrom(...gridNames).chain((name) => fc.string({ maxLength: 4 }).map((tail) => name + tail))), (text) => {
-        const found = findFluid(text);
-        if (isProblem(found)) expect(found.sentence.length).toBeGreaterThan(10);
-        else expect(found.name.length).toBeGreaterThan(0);
-      }),
+      fc.property(
+        fc.oneof(
+          fc.string({ maxLength: 40 }),
+          fc.constantFrom(...gridNames).chain((name) => fc.string({ maxLength: 4 }).map((tail) => name + tail)),
+        ),
+        (text) => {
+          const found = findFluid(text);
+          if (isProblem(found)) expect(found.sentence.length).toBeGreaterThan(10);
+          else expect(found.name.length).toBeGreaterThan(0);
+        },
+      ),
       { numRuns: 1500 },
     );
   });
 });
 
 describe("lists", () => {
-  test.each(shelf().map((entry) => [entry.name, entry] as const))("%s has sources of the bibliography, a range, an uncertainty and a summary", (_name, entry) => {
-    expect(entry.sources.length).toBeGreaterThan(0);
-    for (const key of entry.sources) expect(Object.keys(bibliography)).toContain(key);
-    expect(entry.range.T[0]).toBeLessThan(entry.range.T[1]);
-    expect(entry.range.p[0]).toBeLessThan(entry.range.p[1]);
-    expect(entry.uncertainty).toMatch(/%/);
-    expect(entry.summary).toMatch(/^[A-Z0-9].*\.$/);
-    const fluid = entry.fluid(entry.parameter ? (entry.parameter.otherwise ?? entry.parameter.example) : undefined);
-    if (isProblem(fluid)) throw new Error(fluid.sentence);
-    for (const key of fluid.sources) expect(Object.keys(bibliography)).toContain(key);
-  });
+  test.each(shelf().map((entry) => [entry.name, entry] as const))(
+    "%s has sources of the bibliography, a range, an uncertainty and a summary",
+    (_name, entry) => {
+      expect(entry.sources.length).toBeGreaterThan(0);
+      for (const key of entry.sources) expect(Object.keys(bibliography)).toContain(key);
+      expect(entry.range.T[0]).toBeLessThan(entry.range.T[1]);
+      expect(entry.range.p[0]).toBeLessThan(entry.range.p[1]);
+      expect(entry.uncertainty).toMatch(/%/);
+      expect(entry.summary).toMatch(/^[A-Z0-9].*\.$/);
+      const fluid = entry.fluid(entry.parameter ? (entry.parameter.otherwise ?? entry.parameter.example) : undefined);
+      if (isProblem(fluid)) throw new Error(fluid.sentence);
+      for (const key of fluid.sources) expect(Object.keys(bibliography)).toContain(key);
+    },
+  );
 });
 
 describe("laws of every fluid", () => {
@@ -135,7 +144,8 @@ describe("laws of every fluid", () => {
           expect(found.sentence).not.toMatch(/NaN|undefined|Infinity/);
           return;
         }
-        for (const value of [found.density, found.cp, found.viscosity, found.conductivity]) if (value !== undefined) expect(value).toBeGreaterThan(0);
+        for (const value of [found.density, found.cp, found.viscosity, found.conductivity])
+          if (value !== undefined) expect(value).toBeGreaterThan(0);
         for (const value of Object.values(found)) if (typeof value === "number") expect(Number.isFinite(value)).toBe(true);
         const { origin, ...parts } = fluid.uncertainty(T, p);
         expect(origin.length).toBeGreaterThan(0);

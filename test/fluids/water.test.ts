@@ -75,7 +75,7 @@ function printedQuantity(formulation: string, inputs: Readonly<Record<string, nu
 
 describe("the values printed in the releases", () => {
   test.each(
-    readCsv("water-official.csv").map((row) => [row["formulation"] as string, row["inputs"] as string, row["quantity"] as string, row] as const),
+    readCsv("water-official.csv").map((row) => [row.formulation as string, row.inputs as string, row.quantity as string, row] as const),
   )("%s: %s, %s", (formulation, inputs, quantity, row) => {
     const [value, tolerance] = printedQuantity(formulation, inputsOf(inputs), quantity);
     expect(relative(value, numberIn(row, "value") as number)).toBeLessThan(tolerance);
@@ -99,25 +99,28 @@ describe("the values printed in the releases", () => {
 });
 
 describe("against the scientific formulation", () => {
-  test.each(readCsv("water-states.csv").map((row) => [row["t_C"] as string, row["p_Pa"] as string, row] as const))("%s °C, %s Pa", (_t, _p, row) => {
-    const found = stateAt((numberIn(row, "t_C") as number) + 273.15, numberIn(row, "p_Pa") as number);
-    const near = row["near_critical"] === "1";
-    const deviation = (quantity: string): number | undefined => numberIn(row, `${quantity}_dev`);
-    const check = (quantity: "density" | "cp" | "viscosity" | "conductivity", loose: number, printed: number): void => {
-      const known = deviation(quantity);
-      const expected = (numberIn(row, quantity) as number) * (1 + (known ?? 0) / 100);
-      // A deviation is printed to a last digit; half of it is the tolerance. Rows without one get the release's own band.
-      expect(relative(found[quantity], expected), quantity).toBeLessThan(known === undefined ? loose : printed);
-    };
-    check("density", 3e-4, near ? 1e-4 : 1.5e-5);
-    check("cp", 3e-3, near ? 1e-3 : 1.5e-5);
-    check("viscosity", 1e-3, 6e-5);
-    check("conductivity", 1e-3, 1e-4);
-    const expansivity = numberIn(row, "expansivity");
-    if (expansivity !== undefined && !near) expect(relative(found.expansivity, expansivity)).toBeLessThan(1e-2);
-  });
+  test.each(readCsv("water-states.csv").map((row) => [row.t_C as string, row.p_Pa as string, row] as const))(
+    "%s °C, %s Pa",
+    (_t, _p, row) => {
+      const found = stateAt((numberIn(row, "t_C") as number) + 273.15, numberIn(row, "p_Pa") as number);
+      const near = row.near_critical === "1";
+      const deviation = (quantity: string): number | undefined => numberIn(row, `${quantity}_dev`);
+      const check = (quantity: "density" | "cp" | "viscosity" | "conductivity", loose: number, printed: number): void => {
+        const known = deviation(quantity);
+        const expected = (numberIn(row, quantity) as number) * (1 + (known ?? 0) / 100);
+        // A deviation is printed to a last digit; half of it is the tolerance. Rows without one get the release's own band.
+        expect(relative(found[quantity], expected), quantity).toBeLessThan(known === undefined ? loose : printed);
+      };
+      check("density", 3e-4, near ? 1e-4 : 1.5e-5);
+      check("cp", 3e-3, near ? 1e-3 : 1.5e-5);
+      check("viscosity", 1e-3, 6e-5);
+      check("conductivity", 1e-3, 1e-4);
+      const expansivity = numberIn(row, "expansivity");
+      if (expansivity !== undefined && !near) expect(relative(found.expansivity, expansivity)).toBeLessThan(1e-2);
+    },
+  );
 
-  test.each(readCsv("water-saturation.csv").map((row) => [row["t_C"] as string, row] as const))("saturation at %s °C", (_t, row) => {
+  test.each(readCsv("water-saturation.csv").map((row) => [row.t_C as string, row] as const))("saturation at %s °C", (_t, row) => {
     const found = water.saturationAtTemperature?.((numberIn(row, "t_C") as number) + 273.15);
     if (found === undefined || isProblem(found)) throw new Error("no saturation");
     const near = (numberIn(row, "t_C") as number) > 360;
@@ -238,7 +241,12 @@ describe("refusals are sentences", () => {
   });
 
   test("saturation outside the line", () => {
-    for (const found of [water.saturationAtTemperature?.(700), water.saturationAtTemperature?.(Number.NaN), water.saturationAtPressure?.(1), water.saturationAtPressure?.(3e7)]) {
+    for (const found of [
+      water.saturationAtTemperature?.(700),
+      water.saturationAtTemperature?.(Number.NaN),
+      water.saturationAtPressure?.(1),
+      water.saturationAtPressure?.(3e7),
+    ]) {
       expect(isProblem(found)).toBe(true);
     }
   });

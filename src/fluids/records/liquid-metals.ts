@@ -50,7 +50,11 @@ function potassiumDensity(T: number): number {
 }
 
 /** Foust: η = A r^(1/3) exp(B r/T) mPa·s with r in g/cm³, one pair of constants below 400 °C and one above. */
-function alkaliViscosity(density: (T: number) => number, cold: readonly [number, number], hot: readonly [number, number]): (T: number) => number {
+function alkaliViscosity(
+  density: (T: number) => number,
+  cold: readonly [number, number],
+  hot: readonly [number, number],
+): (T: number) => number {
   return (T) => {
     const r = density(T) / 1000;
     const [A, B] = fromCelsius(T) <= 400 ? cold : hot;
@@ -66,7 +70,10 @@ function nakDensity(T: number): number {
 /** Straight lines between printed points; cp of mercury changes by 4 % over the whole range. */
 function between(points: readonly (readonly [number, number])[]): (T: number) => number {
   return (T) => {
-    const above = Math.max(1, points.findIndex(([x]) => x >= T));
+    const above = Math.max(
+      1,
+      points.findIndex(([x]) => x >= T),
+    );
     const [x0, y0] = points[above - 1] as readonly [number, number];
     const [x1, y1] = points[above] as readonly [number, number];
     return y0 + ((y1 - y0) * (T - x0)) / (x1 - x0);
@@ -282,7 +289,10 @@ export const metals: readonly MetalRecord[] = [
     conductivity: { form: "from", base: 533.15, c: [0.421, -6.53e-4] },
     uncertainty: { density: 0.02, cp: 0.25, viscosity: 0.1, conductivity: 0.2 },
     origin: "published",
-    cautions: ["The cp of ternary nitrate salt is disputed: 1560 J/(kg·K) is the usual design value; another published fit gives 25 % more, and the bounds hold that.", oxidiser],
+    cautions: [
+      "The cp of ternary nitrate salt is disputed: 1560 J/(kg·K) is the usual design value; another published fit gives 25 % more, and the bounds hold that.",
+      oxidiser,
+    ],
   },
   {
     name: "FLiBe",
