@@ -2,7 +2,7 @@
  * Ideal-gas mixtures: density and cp by ideal mixing, viscosity by Wilke's rule, conductivity by Wassiljewa's form with the coefficients of
  * Mason & Saxena. Composition frozen, by mole.
  */
-import { coverageProblem, isProblem, type Problem, valueProblem } from "../quantities/problems.js";
+import { coverageProblem, type Problem, valueProblem } from "../quantities/problems.js";
 import type { Fluid, FluidRange, State, Uncertainty } from "./fluid.js";
 import type { GasComponent, GasProperties } from "./low-density-gas.js";
 import { impossible, outside, sayTemperature, sayTenths } from "./refusal.js";
@@ -201,9 +201,4 @@ function cautionsAt(about: MixtureAbout, parts: readonly Part[], water: number, 
   )
     said.push("The gas is toxic; local codes and licensed practice come first.");
   return said;
-}
-
-/** The first problem among parts that had to be looked up. */
-export function firstProblem<T>(things: readonly (T | Problem)[]): Problem | undefined {
-  return things.find(isProblem) as Problem | undefined;
 }

@@ -1,5 +1,5 @@
 /** The shelf: every fluid by name, built when first asked for, and the list of them. */
-import { coverageProblem, isProblem, type Problem, valueProblem } from "../quantities/problems.js";
+import { coverageProblem, type Problem, valueProblem } from "../quantities/problems.js";
 import { coolants } from "./coolants.js";
 import type { Fluid } from "./fluid.js";
 import { gasEntries } from "./gas-entries.js";
@@ -209,9 +209,4 @@ function byNameWithNumber(): ReadonlyMap<string, ShelfEntry> {
     entries.flatMap((entry) => (entry.parameter?.namesWithNumber ?? []).map((name) => [keyOf(name), entry] as const)),
   );
   return indexWithNumber;
-}
-
-/** Whether a text is a fluid's name at all; for callers that must tell a name from a table's header. */
-export function isFluidName(name: string): boolean {
-  return !isProblem(findFluid(name));
 }

@@ -1,7 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import type { Fluid, State } from "../../src/fluids/fluid.js";
-import { looksLikeTable, ownTable } from "../../src/fluids/own-table.js";
+import { ownTable } from "../../src/fluids/own-table.js";
 import { water } from "../../src/fluids/water.js";
 import { isProblem, type Problem, sentenceOf } from "../../src/quantities/problems.js";
 import type { Reading } from "../../src/quantities/quantity.js";
@@ -276,12 +276,6 @@ describe("leniency", () => {
     ]);
     expect(stateAt(fluid, -200).cp).toBe(4000);
     expect(stateAt(fluid, 3000).cp).toBe(4000);
-  });
-
-  test("a range is a table when its first row says temperature", () => {
-    expect(looksLikeTable([["temperature [K]", "density"]])).toBe(true);
-    expect(looksLikeTable([["air", "water"]])).toBe(false);
-    expect(looksLikeTable([[1, 2]])).toBe(false);
   });
 });
 
