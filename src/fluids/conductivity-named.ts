@@ -1,6 +1,6 @@
 /** Conductivity correlations of a shape that one paper has for one fluid. */
 import type { ConductivityParts } from "./conductivity.js";
-import { type Conductivity, polynomial, type Substance } from "./transport.js";
+import { type Conductivity, polynomial, type Substance, type TransportState } from "./transport.js";
 import { type ResidualConcentration, residualConcentration } from "./viscosity-named.js";
 
 type Numbers = readonly number[];
@@ -8,7 +8,7 @@ type Rows3 = readonly (readonly [g: number, r: number, s: number])[];
 
 export type ConductivityNamed = { readonly form: "named" } & (HeliumConductivity | HeavyWaterConductivity | R23Conductivity | MethaneConductivity);
 
-/** Hands & Arp 1981 without its critical term, which acts from 3.5 to 12 K. */
+/** Hands & Arp 1981, with its critical term between 3.5 and 12 K. */
 interface HeliumConductivity {
   readonly name: "helium";
   readonly s: readonly [number, number, number, number];
@@ -71,8 +71,9 @@ function helium({ s, c }: HeliumConductivity, { molarMass }: Substance): Conduct
   const [c0, c1, c2, c3, c4, c5, c6, c7, c8, c9, c10] = c as readonly [
     number, number, number, number, number, number, number, number, number, number, number,
   ];
-  return ({ T, rho }) => {
-    const r = rho * molarMass;
+  return (state, viscosity) => {
+    const { T } = state;
+    const r = state.rho * molarMass;
     const x = 1 / T;
     const root = Math.cbrt(T);
     const square = root * root;
@@ -82,9 +83,44 @@ function helium({ s, c }: HeliumConductivity, { molarMass }: Substance): Conduct
       dilute +
       (c0 + c1 * T + c2 * root + c3 * square) * r +
       (c4 + c5 * root + c6 * square) * r ** 3 +
-      (c7 + c8 * root + c9 * square + c10 / T) * r * r * Math.log(r / 68)
+      (c7 + c8 * root + c9 * square + c10 / T) * r * r * Math.log(r / 68) +
+      (T > 3.5 && T < 12 ? heliumCritical(state, r, viscosity) : 0)
     );
   };
+}
+
+/**
+ * The critical term with the scaled equation of state of its paper near the critical point (all constants of helium-4). The factor in front is the one
+ * in common use, which differs from the printed one.
+ */
+function heliumCritical({ T, rho, pRho, pT }: TransportState, r: number, viscosity: number): number {
+  const x0 = 0.392;
+  const E1 = 2.8461;
+  const E2 = 0.27156;
+  const beta = 0.3554;
+  const gamma = 1.1743;
+  const delta = 4.304;
+  const rhoc = 69.158;
+  const Tc = 5.18992;
+  const pc = 2.2746e5;
+  const awayT = Math.abs(1 - T / Tc);
+  const awayRho = Math.max(Math.abs(1 - r / rhoc), 1e-9);
+  const plain = 1 / (rho * pRho);
+  const weight = (awayT / 0.2) ** 2 + (awayRho / 0.25) ** 2;
+  let compressibility = plain;
+  if (weight <= 1) {
+    const x = (awayT / awayRho) ** (1 / beta);
+    const grown = 1 + x / x0;
+    const inner = 1 + E2 * grown ** (2 / beta);
+    const power = (gamma - 1) / (2 * beta);
+    const h = E1 * grown * inner ** power;
+    const slope = (E1 / x0) * (inner ** power + (((gamma - 1) * E2) / (beta * beta)) * grown ** (2 / beta) * inner ** (power - 1));
+    const scaled = awayRho ** (delta - 1) * (delta * h - (x / beta) * slope);
+    if (scaled > 0) compressibility = weight * plain + (1 - weight) / (scaled * (r / rhoc) ** 2 * pc);
+  }
+  const front = 3.4685233e-17 * 3.726229668;
+  const decay = Math.exp(-18.66 * awayT * awayT - 4.25 * awayRho ** 4);
+  return ((front * Math.sqrt(compressibility) * T * T * pT * pT) / (r * viscosity)) * decay;
 }
 
 function heavyWater(record: HeavyWaterConductivity, { molarMass }: Substance): Conductivity {

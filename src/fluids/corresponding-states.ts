@@ -59,10 +59,13 @@ export interface Relation {
   readonly search: ConformalSearch;
 }
 
-const mostSteps = 40;
+/** Relative step after which transport no longer changes in its seventh figure. */
+const settled = 1e-8;
+/** A conformal temperature further off than this (in ln T) belongs to another root. */
+const furthest = 0.9;
 
 /**
- * Newton's method for (T0, ρ0) from the corresponding state of the critical points. At low density any state is conformal, and the first guess stands.
+ * (T0, ρ0) sought from the corresponding state of the critical points.
  * `own` may not be the evaluator that a caller is still reading.
  */
 export function conformalSearch(substance: Substance, own: Helmholtz, reference: ReferenceFluid): ConformalSearch {
@@ -72,33 +75,75 @@ export function conformalSearch(substance: Substance, own: Helmholtz, reference:
   return (T, rho) => {
     if (last.ownT === T && last.ownRho === rho) return last;
     const target = own.pressurePart(from.T / T, rho / from.rho);
-    const found = solve(reference.equation, target.a, target.d, from.T / T, rho / from.rho);
+    const found = solve(reference.equation, target.a, target.d, { tau: from.T / T, delta: rho / from.rho });
     last = { T: to.T / found.tau, rho: found.delta * to.rho, ownT: T, ownRho: rho };
     return last;
   };
 }
 
-function solve(equation: Helmholtz, a: number, d: number, tauStart: number, deltaStart: number): { readonly tau: number; readonly delta: number } {
-  let tau = tauStart;
-  let delta = deltaStart;
-  for (let count = 0; count < mostSteps; count++) {
+interface Reduced {
+  readonly tau: number;
+  readonly delta: number;
+}
+
+function solve(equation: Helmholtz, a: number, d: number, start: Reduced): Reduced {
+  return exact(equation, a, d, start) ?? nearest(equation, a, d, start);
+}
+
+/** Newton's method in ln τ and ln δ, where ∂(δα_δ)/∂ln δ = δα_δ + δ²α_δδ; undefined where it does not settle or strays. */
+function exact(equation: Helmholtz, a: number, d: number, start: Reduced): Reduced | undefined {
+  let { tau, delta } = start;
+  for (let count = 0; count < 15; count++) {
     const r = equation.residual(tau, delta);
     const missA = r.a - a;
     const missD = r.d - d;
-    if (Math.abs(missA) < 1e-11 && Math.abs(missD) < 1e-11) break;
-    // In ln τ and ln δ: ∂(δα_δ)/∂ln δ = δα_δ + δ²α_δδ.
-    const aT = r.t;
-    const aD = r.d;
-    const dT = r.dt;
-    const dD = r.d + r.dd;
-    const determinant = aT * dD - aD * dT;
-    if (Math.abs(determinant) < 1e-14) break;
-    const stepT = (aD * missD - dD * missA) / determinant;
-    const stepD = (dT * missA - aT * missD) / determinant;
-    const held = Math.min(1, 0.3 / Math.max(Math.abs(stepT), Math.abs(stepD)));
+    const alongD = r.d + r.dd;
+    const determinant = r.t * alongD - r.d * r.dt;
+    const stepT = (r.d * missD - alongD * missA) / determinant;
+    const stepD = (r.dt * missA - r.t * missD) / determinant;
+    const longest = Math.max(Math.abs(stepT), Math.abs(stepD));
+    if (!(longest < Number.POSITIVE_INFINITY)) return undefined;
+    const held = Math.min(1, 0.3 / longest);
     tau *= Math.exp(held * stepT);
     delta *= Math.exp(held * stepD);
-    if (Math.abs(stepT) < 1e-10 && Math.abs(stepD) < 1e-10) break;
+    if (longest < settled) return Math.abs(Math.log(tau / start.tau)) < furthest ? { tau, delta } : undefined;
+  }
+  return undefined;
+}
+
+/** Least squares by Levenberg and Marquardt. In a thin cold gas no state is quite conformal; the nearest one then stands. */
+function nearest(equation: Helmholtz, a: number, d: number, start: Reduced): Reduced {
+  let { tau, delta } = start;
+  let damping = 1e-3;
+  let { a: ra, d: rd, t: aT, dt: dT, dd } = equation.residual(tau, delta);
+  let miss = (ra - a) ** 2 + (rd - d) ** 2;
+  for (let count = 0; count < 60 && miss > 0; count++) {
+    const aD = rd;
+    const dD = rd + dd;
+    const slopeT = aT * (ra - a) + dT * (rd - d);
+    const slopeD = aD * (ra - a) + dD * (rd - d);
+    const bend = aT * aD + dT * dD;
+    const bendT = (aT * aT + dT * dT) * (1 + damping);
+    const bendD = (aD * aD + dD * dD) * (1 + damping);
+    const determinant = bendT * bendD - bend * bend;
+    const stepT = (bend * slopeD - bendD * slopeT) / determinant;
+    const stepD = (bend * slopeT - bendT * slopeD) / determinant;
+    const longest = Math.max(Math.abs(stepT), Math.abs(stepD));
+    if (!(longest < Number.POSITIVE_INFINITY) || longest < 1e-5) break;
+    const held = Math.min(1, 0.3 / longest);
+    const nextTau = tau * Math.exp(held * stepT);
+    const nextDelta = delta * Math.exp(held * stepD);
+    const next = equation.residual(nextTau, nextDelta);
+    const nextMiss = (next.a - a) ** 2 + (next.d - d) ** 2;
+    if (!(nextMiss < miss)) {
+      damping *= 10;
+      continue;
+    }
+    damping /= 10;
+    tau = nextTau;
+    delta = nextDelta;
+    miss = nextMiss;
+    ({ a: ra, d: rd, t: aT, dt: dT, dd } = next);
   }
   return { tau, delta };
 }

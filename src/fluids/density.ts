@@ -17,8 +17,7 @@ const densest = 8;
 const mostSteps = 120;
 
 /**
- * The reduced density δ with δ(1 + δα_δ) = `target` (p over ρr R T), or undefined where the branch does not hold one.
- * Good to a few units of the last place.
+ * The reduced density δ with δ(1 + δα_δ) = `target` (p over ρr R T), to a few units of the last place; undefined where the branch does not hold one.
  */
 export function densityOn(equation: Helmholtz, tau: number, target: number, branch: Branch): number | undefined {
   let low = branch.low;
@@ -33,7 +32,9 @@ export function densityOn(equation: Helmholtz, tau: number, target: number, bran
     if (excess < 0) low = x;
     else high = x;
     const newton = slope > 0 ? x - excess / slope : Number.NaN;
-    if (Math.abs(newton - x) <= 1e-14 * x || high - low <= 4e-16 * low) return x;
+    if (Math.abs(newton - x) <= 1e-14 * x) return x;
+    // The bracket has closed: on the root, or on an end of a branch that does not reach the pressure.
+    if (high - low <= 4e-16 * high && high < Number.POSITIVE_INFINITY) return Math.abs(excess) <= 1e-9 * Math.max(target, x) ? x : undefined;
     const inside = newton > low && newton < high;
     const slow = count > 3 && Math.abs(newton - x) > 0.5 * stepBefore;
     if (inside && Math.abs(newton - x) <= 1e-9 * x) return polished(equation, tau, target, newton, low, high);

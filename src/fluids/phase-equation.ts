@@ -29,8 +29,8 @@ export interface PhaseEquation {
   roughPressure(T: number): number;
 }
 
-/** Nearer to the ancillary's pressure than this, Maxwell's criterion decides. */
-const margin = 0.03;
+/** Nearer to the ancillary's pressure than this, Maxwell's criterion decides: the worst ancillary of the shelf is 10 % out in a cold liquid. */
+const margin = 0.15;
 /** Above this share of the critical temperature it decides within a factor 2, for the branches lie close. */
 const closeTo = 0.94;
 /** A pure fluid nearer to its line than this is two phases as far as anyone can say. */
@@ -77,7 +77,7 @@ export function phaseEquation(record: PureRecord): PhaseEquation {
   const density = (T: number, p: number, side: Side): number | undefined => {
     const tau = reducing.T / T;
     const target = p / (scale * T);
-    const found = side === "beyond" ? beyond(tau, target, T, p) : beside(tau, target, T, p, side);
+    const found = side === "beyond" ? beyond(tau, target, T, p) : (beside(tau, target, T, p, side) ?? nearTop(tau, target, T, p));
     return found === undefined ? undefined : found * reducing.rho;
   };
 
@@ -85,6 +85,10 @@ export function phaseEquation(record: PureRecord): PhaseEquation {
     const start = target / cubicCompressibility(T / record.critical.T, p / record.critical.p, acentric);
     return densityOn(equation, tau, target, { low: 0, high: Number.POSITIVE_INFINITY, start });
   };
+
+  /** Close under the dome's top the short equations for the branches can miss; there the whole isotherm is searched. */
+  const nearTop = (tau: number, target: number, T: number, p: number): number | undefined =>
+    T > 0.98 * domeTop ? beyond(tau, target, T, p) : undefined;
 
   const beside = (tau: number, target: number, T: number, p: number, side: Side): number | undefined => {
     const near = !blend && !isFar(T, p, ancillaryAt(lines.pressure, T));

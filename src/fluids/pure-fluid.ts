@@ -18,8 +18,10 @@ export type ReferenceRecords = (name: string) => PureRecord;
 
 /** Lowest pressure offered: a hundredth of a pascal is no continuum in any duct, but vapours of cold liquids reach it. */
 const thinnest = 1e-2;
+/** Published melting lines and triple points disagree by some hundredths of a kelvin, K. */
+const meltingSlack = 0.1;
 /** Above this ratio to the ideal gas's, cp says only that the critical point is near. */
-const divergentCp = 500;
+const divergentCp = 5000;
 
 export function pureRange(record: PureRecord): FluidRange {
   return { T: record.T, p: [thinnest, record.pMax] };
@@ -39,7 +41,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
   const refusal = (T: number, p: number): Problem | undefined => {
     const out = impossible(T, p) ?? outside(capitalised, range, T, p);
     if (out || !record.melting) return out;
-    const solid = meltingPressure(record.melting, T);
+    const solid = meltingPressure(record.melting, T + meltingSlack);
     if (solid === undefined || p <= Math.max(solid, thinnest)) return undefined;
     const melts = meltingTemperature(record.melting, p);
     return coverageProblem(
@@ -119,8 +121,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     scratch.idealTT = i.tt;
     const enthalpy = (R * T * (1 + i.t + r.t + r.d)) / molarMass;
     const speedOfSound = Math.sqrt(((R * T) / molarMass) * slope * (cp / cv));
-    const viscosity = transport.viscosity(scratch);
-    const conductivity = viscosity === undefined ? undefined : transport.conductivity(scratch, viscosity);
+    const { viscosity, conductivity } = transport(scratch);
     return {
       T,
       p,
@@ -200,6 +201,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     let fb = miss(b);
     if (fa >= 0) return tripleOrLimit;
     if (fb <= 0) return phases.domeTop;
+    let kept = 0;
     for (let count = 0; count < 100; count++) {
       const x = (a * fb - b * fa) / (fb - fa);
       const fx = miss(x);
@@ -207,11 +209,13 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
       if (fx < 0) {
         a = x;
         fa = fx;
-        fb /= 2;
+        if (kept < 0) fb /= 2;
+        kept = -1;
       } else {
         b = x;
         fb = fx;
-        fa /= 2;
+        if (kept > 0) fa /= 2;
+        kept = 1;
       }
     }
     return 2 / (a + b);
@@ -249,6 +253,11 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
       said.push(`Close to the critical point of ${name} properties change steeply and heat transfer can deteriorate; ordinary equations do not hold here.`);
     }
     if (record.predictive) said.push(`The ${record.predictive} of ${name} comes from a predictive method, good to 5 to 10 %.`);
+    const limits = record.viscosityT;
+    if (limits && (T < limits[0] || T > limits[1])) {
+      said.push(`The viscosity of ${name} holds from ${sayTemperature(limits[0])} to ${sayTemperature(limits[1])} only; none is given here.`);
+    }
+    if (!record.melting && p > 1e7 && T < 1.2 * tripleOrLimit) said.push(`No melting line of ${name} stands on the shelf: under this pressure it may be solid so close to its freezing point.`);
     if (!record.viscosity) said.push(`No published viscosity and conductivity of ${name} stand on the shelf: density and cp only.`);
     return said;
   }
@@ -271,13 +280,12 @@ function uncertaintyOf({ uncertainty }: PureRecord, factor: number): Uncertainty
   };
 }
 
-interface Transport {
-  viscosity(state: TransportState): number | undefined;
-  conductivity(state: TransportState, viscosity: number): number | undefined;
-}
+/** The object is the evaluator's own and changes at the next call. */
+type Transport = (state: TransportState) => { viscosity: number | undefined; conductivity: number | undefined };
 
 function transportOf(record: PureRecord, substance: Substance, references: ReferenceRecords): Transport {
-  if (!record.viscosity || !record.conductivity) return { viscosity: () => undefined, conductivity: () => undefined };
+  const out: ReturnType<Transport> = { viscosity: undefined, conductivity: undefined };
+  if (!record.viscosity || !record.conductivity) return () => out;
   const relations = new Map<string, Relation>();
   const relate = (name: string): Relation => {
     const known = relations.get(name);
@@ -296,9 +304,13 @@ function transportOf(record: PureRecord, substance: Substance, references: Refer
     vapourDensity: (T) => ancillaryAt(record.saturation.vapour, T),
   };
   const conductivity = conductivityOf(record.conductivity, parts);
-  return {
-    viscosity: (state) => positive(viscosity.dilute(state.T) + viscosity.excess(state)),
-    conductivity: (state, full) => positive(conductivity(state, full)),
+  const [coldest, hottest] = record.viscosityT ?? record.T;
+  return (state) => {
+    const full = positive(viscosity.dilute(state.T) + viscosity.excess(state));
+    out.viscosity = state.T < coldest || state.T > hottest ? undefined : full;
+    // Only the critical enhancement asks for the viscosity; where there is none, it is nothing.
+    out.conductivity = positive(conductivity(state, full ?? Number.POSITIVE_INFINITY));
+    return out;
   };
 }
 

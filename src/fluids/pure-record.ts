@@ -40,6 +40,8 @@ export interface PureRecord {
   readonly melting?: MeltingLine;
   readonly viscosity?: ViscosityRecord;
   readonly conductivity?: ConductivityRecord;
+  /** K: where the viscosity holds, if narrower than the equation of state. */
+  readonly viscosityT?: readonly [number, number];
   /** Set where viscosity or conductivity is predicted and not fitted to measurements of the fluid. */
   readonly predictive?: "viscosity" | "conductivity" | "viscosity and conductivity";
   /** Per cent: away from the critical region. */
