@@ -1,5 +1,7 @@
 /** Published short equations for the saturation line: pressure and both densities against temperature. */
 
+import { powerSum } from "./power-sum.js";
+
 /** θ = 1 − T/Tr of the ancillary's own Tr. */
 export interface Ancillary {
   /** K */
@@ -13,11 +15,16 @@ export interface Ancillary {
   readonly form: "1 + sum" | "exp" | "exp T";
 }
 
-/** The value at a temperature; above the ancillary's own Tr that at Tr. */
-export function ancillaryAt({ T: Tr, value, terms, form }: Ancillary, T: number): number {
-  const theta = Math.max(0, 1 - T / Tr);
-  let sum = 0;
-  for (const [n, t] of terms) sum += n * theta ** t;
-  if (form === "1 + sum") return value * (1 + sum);
-  return value * Math.exp(form === "exp" ? sum : (Tr / T) * sum);
+/** The value against temperature; above the ancillary's own Tr that at Tr. */
+export function ancillary({ T: Tr, value, terms, form }: Ancillary): (T: number) => number {
+  const sum = powerSum(terms);
+  const series = (T: number): number => (T < Tr ? sum(1 - T / Tr) : 0);
+  switch (form) {
+    case "1 + sum":
+      return (T) => value * (1 + series(T));
+    case "exp":
+      return (T) => value * Math.exp(series(T));
+    case "exp T":
+      return (T) => value * Math.exp((Tr / T) * series(T));
+  }
 }

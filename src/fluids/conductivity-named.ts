@@ -1,6 +1,7 @@
 /** Conductivity correlations of a shape that one paper has for one fluid. */
 import type { ConductivityParts } from "./conductivity.js";
-import { type Conductivity, polynomial, type Substance, type TransportState } from "./transport.js";
+import { powerSum, powerSum2 } from "./power-sum.js";
+import { type Conductivity, type Substance, type TransportState } from "./transport.js";
 import { type ResidualConcentration, residualConcentration } from "./viscosity-named.js";
 
 type Numbers = readonly number[];
@@ -125,10 +126,11 @@ function heliumCritical({ T, rho, pRho, pT }: TransportState, r: number, viscosi
 
 function heavyWater(record: HeavyWaterConductivity, { molarMass }: Substance): Conductivity {
   const { Be, B, C1, C2, CT1, CT2, CR1, CR2, CR3, rhor1, D1 } = record;
+  const dilute = powerSum(record.A);
   return ({ T, rho }) => {
     const t = T / record.T;
     const r = (rho * molarMass) / record.density;
-    const background = polynomial(record.A, t) - B[0] * Math.expm1(Be * r) + r * (B[1] + r * (B[2] + r * (B[3] + r * B[4])));
+    const background = dilute(t) - B[0] * Math.expm1(Be * r) + r * (B[1] + r * (B[2] + r * (B[3] + r * B[4])));
     const f1 = Math.exp(t * (CT1 + CT2 * t));
     const f2 = Math.exp(CR1 * (r - 1) ** 2) + CR2 * Math.exp(CR3 * (r - rhor1) ** 2);
     const ta = t / (Math.abs(t - 1.1) + 1.1);
@@ -145,6 +147,9 @@ const methaneRho = 10139;
 
 function methane(record: MethaneConductivity, { vapourDensity, substance, equation }: ConductivityParts): Conductivity {
   const own = equation();
+  const over = powerSum2(turned(record.over));
+  const under = powerSum2(turned(record.under));
+  const thick = powerSum2(turned(record.j));
   return ({ T, rho, idealTT }) => {
     const d = rho / methaneRho;
     const t = methaneT / T;
@@ -153,11 +158,11 @@ function methane(record: MethaneConductivity, { vapourDensity, substance, equati
     let dilute = 0;
     for (let i = record.C.length - 1; i >= 0; i--) dilute = dilute * root + (record.C[i] as number);
     const eta0 = (10.5 * Math.sqrt(x) * dilute) / x;
-    const eta = eta0 + (12.149 * sum(record.over, d, t)) / (1 + sum(record.under, d, t));
+    const eta = eta0 + (12.149 * over(t, d)) / (1 + under(t, d));
     const free = 1.45885 - 0.4377162 / x;
     const k0 = 0.51828 * eta0 * (3.75 - free * (idealTT + 1.5));
     const thinner = T < methaneT && rho < methaneRho ? vapourDensity(T) / methaneRho : 1;
-    const dense = 6.29638 * (sum(record.j, d, t) + (record.j6 * d * d) / thinner);
+    const dense = 6.29638 * (thick(t, d) + (record.j6 * d * d) / thinner);
     return 1e-3 * (k0 + dense + criticalOf(T, rho, d, t, eta));
   };
 
@@ -171,8 +176,7 @@ function methane(record: MethaneConductivity, { vapourDensity, substance, equati
   }
 }
 
-function sum(rows: Rows3, d: number, t: number): number {
-  let total = 0;
-  for (const [g, r, s] of rows) total += g * d ** r * (s === 0 ? 1 : t ** s);
-  return total;
+/** Rows as the paper has them, density before temperature, turned for the sum. */
+function turned(rows: Rows3): readonly (readonly [number, number, number])[] {
+  return rows.map(([g, r, s]) => [g, s, r] as const);
 }

@@ -6,7 +6,8 @@ import { type ConductivityNamed, namedConductivity } from "./conductivity-named.
 import { type CorrespondingConductivity, correspondingConductivity, type Relation } from "./corresponding-states.js";
 import { type CriticalEnhancement, criticalEnhancement } from "./critical-enhancement.js";
 import type { Helmholtz } from "./helmholtz.js";
-import { type Conductivity, polynomial, type Substance, type TransportState, type Viscosity } from "./transport.js";
+import { dampedSum, powerSum, powerSum2 } from "./power-sum.js";
+import { type Conductivity, type Substance, type TransportState, type Viscosity } from "./transport.js";
 import { logPolynomial } from "./viscosity.js";
 
 type Rows2 = readonly (readonly [a: number, t: number])[];
@@ -74,10 +75,15 @@ function sumOf(record: Extract<ConductivityRecord, { form: "sum" }>, parts: Cond
 
 function diluteOf(record: DiluteConductivity, { substance, viscosity }: ConductivityParts): (state: TransportState) => number {
   switch (record.form) {
-    case "ratio":
-      return ({ T }) => polynomial(record.a, T / record.T) / polynomial(record.b, T / record.T);
-    case "viscosity and powers":
-      return ({ T }) => record.A0 * 1e6 * viscosity.dilute(T) + polynomial(record.a, substance.reducing.T / T);
+    case "ratio": {
+      const above = powerSum(record.a);
+      const below = powerSum(record.b);
+      return ({ T }) => above(T / record.T) / below(T / record.T);
+    }
+    case "viscosity and powers": {
+      const rest = powerSum(record.a);
+      return ({ T }) => record.A0 * 1e6 * viscosity.dilute(T) + rest(substance.reducing.T / T);
+    }
     case "log polynomial":
       return ({ T }) => logPolynomial(record, T);
     case "Eucken":
@@ -96,19 +102,9 @@ function diluteOf(record: DiluteConductivity, { substance, viscosity }: Conducti
 /** Also what the corresponding-states method takes from its reference fluid. */
 export function denseConductivityOf(record: DenseConductivity, substance: Substance): (T: number, rho: number) => number {
   if (record.form === "polynomial") {
-    return (T, rho) => {
-      const tau = record.T / T;
-      const delta = (rho * substance.molarMass) / record.density;
-      let sum = 0;
-      for (const [B, t, d] of record.B) sum += B * (t === 0 ? 1 : t === -1 ? 1 / tau : tau ** t) * delta ** d;
-      return sum;
-    };
+    const sum = powerSum2(record.B);
+    return (T, rho) => sum(record.T / T, (rho * substance.molarMass) / record.density);
   }
-  return (T, rho) => {
-    const tau = substance.reducing.T / T;
-    const delta = rho / substance.reducing.rho;
-    let sum = 0;
-    for (const [A, t, d, l] of record.A) sum += A * tau ** t * delta ** d * (l === 0 ? 1 : Math.exp(-(delta ** l)));
-    return sum;
-  };
+  const sum = dampedSum(record.A.map(([A, t, d, l]) => [A, t, d, l === 0 ? 0 : -1, l] as const));
+  return (T, rho) => sum(substance.reducing.T / T, rho / substance.reducing.rho);
 }

@@ -4,7 +4,8 @@
  */
 import type { CriticalEnhancement } from "./critical-enhancement.js";
 import type { Helmholtz } from "./helmholtz.js";
-import { type Conductivity, kineticViscosity, polynomial, type Substance, type TransportState, type Viscosity } from "./transport.js";
+import { powerSum } from "./power-sum.js";
+import { type Conductivity, kineticViscosity, type Substance, type TransportState, type Viscosity } from "./transport.js";
 
 type Rows2 = readonly (readonly [a: number, t: number])[];
 
@@ -50,8 +51,8 @@ export interface Conformal {
   readonly rho: number;
 }
 
-/** Finds the reference's conformal state for a state of the fluid, both by their own equations. */
-export type ConformalSearch = (T: number, rho: number) => Conformal;
+/** Finds the reference's conformal state for a state of the fluid, each by its own equation of state. */
+export type ConformalSearch = (state: TransportState) => Conformal;
 
 /** A reference fluid with the search for one fluid's conformal states on it. */
 export interface Relation {
@@ -59,24 +60,24 @@ export interface Relation {
   readonly search: ConformalSearch;
 }
 
-/** Relative step after which transport no longer changes in its seventh figure. */
-const settled = 1e-8;
+/** Newton's method converges quadratically: behind this relative step the conformal state is good to 1e-9. */
+const settled = 1e-5;
 /** A conformal temperature further off than this (in ln T) belongs to another root. */
 const furthest = 0.9;
 
-/**
- * (T0, ρ0) sought from the corresponding state of the critical points.
- * `own` may not be the evaluator that a caller is still reading.
- */
-export function conformalSearch(substance: Substance, own: Helmholtz, reference: ReferenceFluid): ConformalSearch {
+/** (T0, ρ0) sought from the corresponding state of the critical points. Keeps the last, which viscosity and conductivity share. */
+export function conformalSearch(substance: Substance, reference: ReferenceFluid): ConformalSearch {
   const from = substance.reducing;
   const to = reference.substance.reducing;
-  let last: Conformal & { readonly ownT: number; readonly ownRho: number } = { T: 0, rho: 0, ownT: Number.NaN, ownRho: Number.NaN };
-  return (T, rho) => {
-    if (last.ownT === T && last.ownRho === rho) return last;
-    const target = own.pressurePart(from.T / T, rho / from.rho);
-    const found = solve(reference.equation, target.a, target.d, { tau: from.T / T, delta: rho / from.rho });
-    last = { T: to.T / found.tau, rho: found.delta * to.rho, ownT: T, ownRho: rho };
+  let last: Conformal = { T: 0, rho: 0 };
+  let ownT = Number.NaN;
+  let ownRho = Number.NaN;
+  return ({ T, rho, alpha, alphaD }) => {
+    if (ownT === T && ownRho === rho) return last;
+    const found = solve(reference.equation, alpha, alphaD, { tau: from.T / T, delta: rho / from.rho });
+    last = { T: to.T / found.tau, rho: found.delta * to.rho };
+    ownT = T;
+    ownRho = rho;
     return last;
   };
 }
@@ -102,7 +103,7 @@ function exact(equation: Helmholtz, a: number, d: number, start: Reduced): Reduc
     const stepT = (r.d * missD - alongD * missA) / determinant;
     const stepD = (r.dt * missA - r.t * missD) / determinant;
     const longest = Math.max(Math.abs(stepT), Math.abs(stepD));
-    if (!(longest < Number.POSITIVE_INFINITY)) return undefined;
+    if (!(longest < Number.POSITIVE_INFINITY) || (count > 6 && longest > 0.1)) return undefined;
     const held = Math.min(1, 0.3 / longest);
     tau *= Math.exp(held * stepT);
     delta *= Math.exp(held * stepD);
@@ -117,7 +118,7 @@ function nearest(equation: Helmholtz, a: number, d: number, start: Reduced): Red
   let damping = 1e-3;
   let { a: ra, d: rd, t: aT, dt: dT, dd } = equation.residual(tau, delta);
   let miss = (ra - a) ** 2 + (rd - d) ** 2;
-  for (let count = 0; count < 60 && miss > 0; count++) {
+  for (let count = 0; count < 20 && miss > 0; count++) {
     const aD = rd;
     const dD = rd + dd;
     const slopeT = aT * (ra - a) + dT * (rd - d);
@@ -129,7 +130,7 @@ function nearest(equation: Helmholtz, a: number, d: number, start: Reduced): Red
     const stepT = (bend * slopeD - bendD * slopeT) / determinant;
     const stepD = (bend * slopeT - bendT * slopeD) / determinant;
     const longest = Math.max(Math.abs(stepT), Math.abs(stepD));
-    if (!(longest < Number.POSITIVE_INFINITY) || longest < 1e-5) break;
+    if (!(longest < Number.POSITIVE_INFINITY) || longest < 1e-4) break;
     const held = Math.min(1, 0.3 / longest);
     const nextTau = tau * Math.exp(held * stepT);
     const nextDelta = delta * Math.exp(held * stepD);
@@ -142,7 +143,9 @@ function nearest(equation: Helmholtz, a: number, d: number, start: Reduced): Red
     damping /= 10;
     tau = nextTau;
     delta = nextDelta;
+    const gained = miss - nextMiss;
     miss = nextMiss;
+    if (gained < 1e-4 * miss) break;
     ({ a: ra, d: rd, t: aT, dt: dT, dd } = next);
   }
   return { tau, delta };
@@ -153,12 +156,14 @@ export function correspondingViscosity(record: CorrespondingViscosity, substance
   const factor = record.Fc ?? 1;
   const masses = Math.sqrt(substance.molarMass / reference.substance.molarMass);
   const point = emptyState();
+  const shape = powerSum(record.shape.a);
   return {
     dilute: (T) => factor * kineticViscosity(T, substance.molarMass, epsilon, sigma),
-    excess({ T, rho }) {
-      const conformal = search(T, rho);
+    excess(state) {
+      const { T, rho } = state;
+      const conformal = search(state);
       point.T = conformal.T;
-      point.rho = conformal.rho * polynomial(record.shape.a, rho / record.shape.rho);
+      point.rho = conformal.rho * shape(rho / record.shape.rho);
       return reference.viscosity.excess(point) * scaling(T, rho, conformal) * masses;
     },
   };
@@ -174,15 +179,17 @@ export function correspondingConductivity(
   const { molarMass, gasConstant } = substance;
   const masses = Math.sqrt(reference.substance.molarMass / molarMass);
   const pair = record.lennardJones;
+  const shape = powerSum(record.shape.a);
+  const internal = powerSum(record.internal);
   const factor = record.Fc ?? 1;
   const diluteViscosity = pair ? (T: number) => factor * kineticViscosity(T, molarMass, pair.epsilon, pair.sigma) : viscosity.dilute;
   return (state, full) => {
     const { T, rho } = state;
     const eta0 = diluteViscosity(T);
     const inner = gasConstant * (1 - state.idealTT) - 2.5 * gasConstant;
-    const dilute = (eta0 / molarMass) * (3.75 * gasConstant + 1000 * polynomial(record.internal, T) * inner);
-    const conformal = search(T, rho);
-    const dense = reference.denseConductivity(conformal.T, conformal.rho * polynomial(record.shape.a, rho / record.shape.rho));
+    const dilute = (eta0 / molarMass) * (3.75 * gasConstant + 1000 * internal(T) * inner);
+    const conformal = search(state);
+    const dense = reference.denseConductivity(conformal.T, conformal.rho * shape(rho / record.shape.rho));
     return dilute + dense * scaling(T, rho, conformal) * masses + critical(state, full);
   };
 }
@@ -193,5 +200,5 @@ function scaling(T: number, rho: number, conformal: Conformal): number {
 }
 
 function emptyState(): TransportState {
-  return { T: 0, rho: 0, p: Number.NaN, pT: Number.NaN, pRho: Number.NaN, cp: Number.NaN, cv: Number.NaN, idealTT: Number.NaN };
+  return { T: 0, rho: 0, p: Number.NaN, pT: Number.NaN, pRho: Number.NaN, cp: Number.NaN, cv: Number.NaN, alpha: Number.NaN, alphaD: Number.NaN, idealTT: Number.NaN };
 }

@@ -37,7 +37,8 @@ export function densityOn(equation: Helmholtz, tau: number, target: number, bran
     if (high - low <= 4e-16 * high && high < Number.POSITIVE_INFINITY) return Math.abs(excess) <= 1e-9 * Math.max(target, x) ? x : undefined;
     const inside = newton > low && newton < high;
     const slow = count > 3 && Math.abs(newton - x) > 0.5 * stepBefore;
-    if (inside && Math.abs(newton - x) <= 1e-9 * x) return polished(equation, tau, target, newton, low, high);
+    // Newton's method converges quadratically: behind a step of 1e-8 only rounding is left.
+    if (inside && Math.abs(newton - x) <= 1e-8 * x) return newton;
     // An overshoot towards an open end is let go as far as a factor 2: beyond, halving takes over once the end is closed.
     const next = inside && !slow && newton <= 2 * x ? newton : further(low, high, x, excess);
     const step = Math.abs(next - x);
@@ -48,18 +49,24 @@ export function densityOn(equation: Helmholtz, tau: number, target: number, bran
   return undefined;
 }
 
-/** Newton converges quadratically: one more step after 1e-9 leaves only rounding. */
-function polished(equation: Helmholtz, tau: number, target: number, x: number, low: number, high: number): number {
-  const part = equation.pressurePart(tau, x);
-  const next = x - (x * (1 + part.d) - target) / (1 + 2 * part.d + part.dd);
-  return next >= low && next <= high ? next : x;
-}
-
 function further(low: number, high: number, x: number, excess: number): number {
   if (high === Number.POSITIVE_INFINITY) return excess < 0 ? 1.6 * x : x / 1.6;
   if (low > 0 && high > 4 * low) return Math.sqrt(low * high);
   return low === 0 && high > 0 ? high / 4 : (low + high) / 2;
 }
+
+/**
+ * Reduced density of a liquid compressed from `known` to a pressure, on Murnaghan's law with the usual exponent of liquids.
+ * A start for the search, never a result.
+ */
+export function compressedDensity(equation: Helmholtz, tau: number, target: number, known: number): number {
+  const part = equation.pressurePart(tau, known);
+  const stiffness = known * (1 + 2 * part.d + part.dd);
+  const rise = target - known * (1 + part.d);
+  return stiffness > 0 && rise > 0 ? known * (1 + (murnaghan * rise) / stiffness) ** (1 / murnaghan) : known;
+}
+
+const murnaghan = 9;
 
 /**
  * Compressibility by the cubic equation of Peng and Robinson, reduced pressure and temperature and acentric factor given: the largest root.

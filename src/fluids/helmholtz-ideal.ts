@@ -32,8 +32,9 @@ export interface Ideal {
 /** The object is the evaluator's own and changes at the next call. */
 export function idealPart(record: IdealRecord, Tr: number): (T: number) => Ideal {
   const out: Ideal = { t: 0, tt: 0 };
-  const einstein = (record.einstein ?? []).map(([n, t]) => [n, t] as const);
-  const quanta = [...einstein, ...(record.einsteinKelvin ?? []).map(([n, theta]) => [n, theta / Tr] as const)];
+  const quanta = [...(record.einstein ?? []), ...(record.einsteinKelvin ?? []).map(([n, theta]) => [n, theta / Tr] as const)];
+  const quantaN = Float64Array.from(quanta, (row) => row[0]);
+  const quantaT = Float64Array.from(quanta, (row) => row[1]);
   const from = record.cpFrom ?? Tr;
   let last = Number.NaN;
   const evaluate = (T: number): void => {
@@ -45,8 +46,9 @@ export function idealPart(record: IdealRecord, Tr: number): (T: number) => Ideal
       t += part;
       tt += part * (power - 1);
     }
-    for (const [n, theta] of quanta) {
-      const x = theta * tau;
+    for (let i = 0; i < quantaN.length; i++) {
+      const n = quantaN[i] as number;
+      const x = (quantaT[i] as number) * tau;
       const rest = Math.expm1(x);
       const share = rest === Number.POSITIVE_INFINITY ? 0 : x / rest;
       t += n * share;

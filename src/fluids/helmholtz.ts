@@ -87,30 +87,51 @@ function distinct<K extends readonly number[]>(keys: readonly K[]): { readonly l
 export function helmholtz(record: ResidualRecord): Helmholtz {
   const terms = separableTerms(record);
   const temperatures = distinct(terms.map((term) => term.temperature));
-  const groups = distinct(terms.map((term) => term.density));
+  const factors = distinct(terms.map(({ density: [, l, g, eta, epsilon] }) => [l, g, eta, epsilon] as const));
+  // Groups of one power of δ under one exponential, those of one exponential side by side.
+  const groups = distinct(terms.map((term, i) => [factors.of[i] as number, term.density[0]] as const));
+  const order = groups.list.map((_, k) => k).sort((a, b) => groupRank(groups.list[a]) - groupRank(groups.list[b]));
+  const placeOf = Int32Array.from(groups.list, (_, k) => order.indexOf(k));
+  const groupOf = groups.of.map((group) => placeOf[group] as number);
+  const degrees = Int32Array.from(order, (k) => (groups.list[k] as readonly [number, number])[1]);
+  const starts = Int32Array.from([...factors.list.keys(), factors.list.length], (j) => order.filter((k) => (groups.list[k] as readonly [number, number])[0] < j).length);
+
   const amounts = Float64Array.from(terms, (term) => term.n);
-  const isotherm = isothermSums(temperatures.list, amounts, temperatures.of, groups.of, groups.list.length);
-  const densities = densityFunctions(groups.list);
+  const isotherm = isothermSums(temperatures.list, amounts, temperatures.of, groupOf, order.length);
+  const exponentials = densityFactors(factors.list, Math.max(...degrees));
   const critical = record.nonAnalytic ? nonAnalytic(record.nonAnalytic) : undefined;
   const associating = record.association ? association(record.association) : undefined;
   const out: Residual = { a: 0, d: 0, dd: 0, t: 0, tt: 0, dt: 0 };
 
   const { s0, s1, s2 } = isotherm;
-  const { value, first, second } = densities;
-  const count = groups.list.length;
+  const { powers, e, x1, x2 } = exponentials;
+  const count = factors.list.length;
 
   return {
     pressurePart(tau, delta) {
       isotherm.at(tau);
-      densities.at(delta);
+      exponentials.at(delta);
       let a = 0;
       let d = 0;
       let dd = 0;
-      for (let k = 0; k < count; k++) {
-        const part = (s0[k] as number) * (value[k] as number);
-        a += part;
-        d += part * (first[k] as number);
-        dd += part * (second[k] as number);
+      for (let j = 0; j < count; j++) {
+        let p0 = 0;
+        let p1 = 0;
+        let p2 = 0;
+        const end = starts[j + 1] as number;
+        for (let k = starts[j] as number; k < end; k++) {
+          const degree = degrees[k] as number;
+          const part = (s0[k] as number) * (powers[degree] as number);
+          const once = degree * part;
+          p0 += part;
+          p1 += once;
+          p2 += (degree - 1) * once;
+        }
+        const ej = e[j] as number;
+        const slope = x1[j] as number;
+        a += ej * p0;
+        d += ej * (p1 + slope * p0);
+        dd += ej * (p2 + 2 * slope * p1 + (slope * slope - slope + (x2[j] as number)) * p0);
       }
       out.a = a;
       out.d = d;
@@ -121,24 +142,42 @@ export function helmholtz(record: ResidualRecord): Helmholtz {
     },
     residual(tau, delta) {
       isotherm.at(tau);
-      densities.at(delta);
+      exponentials.at(delta);
       let a = 0;
       let d = 0;
       let dd = 0;
       let t = 0;
       let tt = 0;
       let dt = 0;
-      for (let k = 0; k < count; k++) {
-        const g = value[k] as number;
-        const part = (s0[k] as number) * g;
-        const slope = first[k] as number;
-        const warm = (s1[k] as number) * g;
-        a += part;
-        d += part * slope;
-        dd += part * (second[k] as number);
-        t += warm;
-        tt += (s2[k] as number) * g;
-        dt += warm * slope;
+      for (let j = 0; j < count; j++) {
+        let p0 = 0;
+        let p1 = 0;
+        let p2 = 0;
+        let q0 = 0;
+        let q1 = 0;
+        let r0 = 0;
+        const end = starts[j + 1] as number;
+        for (let k = starts[j] as number; k < end; k++) {
+          const degree = degrees[k] as number;
+          const power = powers[degree] as number;
+          const part = (s0[k] as number) * power;
+          const once = degree * part;
+          const warm = (s1[k] as number) * power;
+          p0 += part;
+          p1 += once;
+          p2 += (degree - 1) * once;
+          q0 += warm;
+          q1 += degree * warm;
+          r0 += (s2[k] as number) * power;
+        }
+        const ej = e[j] as number;
+        const slope = x1[j] as number;
+        a += ej * p0;
+        d += ej * (p1 + slope * p0);
+        dd += ej * (p2 + 2 * slope * p1 + (slope * slope - slope + (x2[j] as number)) * p0);
+        t += ej * q0;
+        tt += ej * r0;
+        dt += ej * (q1 + slope * q0);
       }
       out.a = a;
       out.d = d;
@@ -153,54 +192,18 @@ export function helmholtz(record: ResidualRecord): Helmholtz {
   };
 }
 
-/** Σ n F, Σ n τF′ and Σ n τ²F″ of every density function, for the τ of the last call of `at`. */
+function groupRank(group: readonly [factor: number, degree: number] | undefined): number {
+  return group ? 1000 * group[0] + group[1] : 0;
+}
+
+/** Σ n F, Σ n τF′ and Σ n τ²F″ of every group, for the τ of the last call of `at`. */
 function isothermSums(keys: readonly TemperatureKey[], amounts: Float64Array, keyOf: Int32Array, groupOf: Int32Array, groupCount: number) {
   const s0 = new Float64Array(groupCount);
   const s1 = new Float64Array(groupCount);
   const s2 = new Float64Array(groupCount);
-  const f0 = new Float64Array(keys.length);
-  const f1 = new Float64Array(keys.length);
-  const f2 = new Float64Array(keys.length);
-  const plain = keys.map((key) => key[1] === 0 && key[2] === 0 && key[4] === 0);
+  const functions = temperatureFunctions(keys);
+  const { f0, f1, f2 } = functions;
   let last = Number.NaN;
-  const evaluate = (tau: number): void => {
-    const logTau = Math.log(tau);
-    for (let i = 0; i < keys.length; i++) {
-      const [t, m, beta, gamma, c, b] = keys[i] as TemperatureKey;
-      if (plain[i]) {
-        const f = t === 0 ? 1 : Math.exp(t * logTau);
-        f0[i] = f;
-        f1[i] = f * t;
-        f2[i] = f * t * (t - 1);
-        continue;
-      }
-      let exponent = t * logTau;
-      let slope = t;
-      let bend = 0;
-      const away = tau - gamma;
-      if (m !== 0) {
-        const power = Math.exp(m * logTau);
-        exponent -= power;
-        slope -= m * power;
-        bend -= m * m * power;
-      }
-      if (beta !== 0) {
-        exponent -= beta * away * away;
-        slope -= 2 * beta * tau * away;
-        bend -= 2 * beta * tau * (2 * tau - gamma);
-      }
-      if (c !== 0) {
-        const q = 1 / (c * away * away + b);
-        exponent += q;
-        slope -= 2 * c * tau * away * q * q;
-        bend += 2 * c * tau * q * q * (4 * c * tau * away * away * q - (2 * tau - gamma));
-      }
-      const f = Math.exp(exponent);
-      f0[i] = f;
-      f1[i] = f * slope;
-      f2[i] = f * (slope * slope - slope + bend);
-    }
-  };
   return {
     s0,
     s1,
@@ -208,7 +211,7 @@ function isothermSums(keys: readonly TemperatureKey[], amounts: Float64Array, ke
     at(tau: number): void {
       if (tau === last) return;
       last = tau;
-      evaluate(tau);
+      functions.at(tau);
       s0.fill(0);
       s1.fill(0);
       s2.fill(0);
@@ -224,34 +227,98 @@ function isothermSums(keys: readonly TemperatureKey[], amounts: Float64Array, ke
   };
 }
 
-/** G, δG′/G and δ²G″/G of every density function, for the δ of the last call of `at`. */
-function densityFunctions(keys: readonly DensityKey[]) {
-  const value = new Float64Array(keys.length);
-  const first = new Float64Array(keys.length);
-  const second = new Float64Array(keys.length);
-  const degree = Int32Array.from(keys, (key) => key[0]);
-  const factors = distinct(keys.map(([, l, g, eta, epsilon]) => [l, g, eta, epsilon] as const));
-  const factorOf = factors.of;
-  const highest = Math.max(...keys.map((key) => Math.max(key[0], key[1])));
-  const powers = new Float64Array(highest + 1);
-  const size = factors.list.length;
-  const l = Int32Array.from(factors.list, (factor) => factor[0]);
-  const g = Float64Array.from(factors.list, (factor) => factor[1]);
-  const eta = Float64Array.from(factors.list, (factor) => factor[2]);
-  const epsilon = Float64Array.from(factors.list, (factor) => factor[3]);
+const highestWhole = 40;
+
+/** F, τF′ and τ²F″ of the distinct functions of τ. A power is a whole part from a table times one of a few fractional parts. */
+function temperatureFunctions(keys: readonly TemperatureKey[]) {
+  const f0 = new Float64Array(keys.length);
+  const f1 = new Float64Array(keys.length);
+  const f2 = new Float64Array(keys.length);
+  const column = (index: number): Float64Array => Float64Array.from(keys, (key) => key[index] as number);
+  const [ts, ms, betas, gammas, cs, bs] = [column(0), column(1), column(2), column(3), column(4), column(5)] as const;
+  const plain = Uint8Array.from(keys, (key) => (key[1] === 0 && key[2] === 0 && key[4] === 0 ? 1 : 0));
+  const wholes = Int32Array.from(keys, ([t]) => (t >= 0 && t < highestWhole ? Math.floor(t) : 0));
+  const fractions = distinct(keys.map(([t], i) => [Number((t - (wholes[i] as number)).toPrecision(12))] as const));
+  const fractionOf = fractions.of;
+  const fraction = Float64Array.from(fractions.list, (one) => one[0]);
+  const fractional = new Float64Array(fraction.length);
+  const whole = new Float64Array(1 + Math.max(...wholes));
+  const special = (i: number, tau: number, logTau: number, power: number): void => {
+    const m = ms[i] as number;
+    const beta = betas[i] as number;
+    const c = cs[i] as number;
+    const away = tau - (gammas[i] as number);
+    let exponent = 0;
+    let slope = ts[i] as number;
+    let bend = 0;
+    if (m !== 0) {
+      const grown = Math.exp(m * logTau);
+      exponent -= grown;
+      slope -= m * grown;
+      bend -= m * m * grown;
+    }
+    if (beta !== 0) {
+      exponent -= beta * away * away;
+      slope -= 2 * beta * tau * away;
+      bend -= 2 * beta * tau * (tau + away);
+    }
+    if (c !== 0) {
+      const q = 1 / (c * away * away + (bs[i] as number));
+      exponent += q;
+      slope -= 2 * c * tau * away * q * q;
+      bend += 2 * c * tau * q * q * (4 * c * tau * away * away * q - (tau + away));
+    }
+    const f = power * Math.exp(exponent);
+    f0[i] = f;
+    f1[i] = f * slope;
+    f2[i] = f * (slope * slope - slope + bend);
+  };
+  return {
+    f0,
+    f1,
+    f2,
+    at(tau: number): void {
+      const logTau = Math.log(tau);
+      whole[0] = 1;
+      for (let k = 1; k < whole.length; k++) whole[k] = (whole[k - 1] as number) * tau;
+      for (let k = 0; k < fraction.length; k++) fractional[k] = fraction[k] === 0 ? 1 : Math.exp((fraction[k] as number) * logTau);
+      for (let i = 0; i < ts.length; i++) {
+        const t = ts[i] as number;
+        const f = (whole[wholes[i] as number] as number) * (fractional[fractionOf[i] as number] as number);
+        if (plain[i] === 0) {
+          special(i, tau, logTau, f);
+          continue;
+        }
+        f0[i] = f;
+        f1[i] = f * t;
+        f2[i] = f * t * (t - 1);
+      }
+    },
+  };
+}
+
+/** The distinct exponentials E of δ with x1 = δE′/E and x2 = δ·dx1/dδ, and the powers of δ, for the δ of the last call of `at`. */
+function densityFactors(keys: readonly (readonly [l: number, g: number, eta: number, epsilon: number])[], highestDegree: number) {
+  const size = keys.length;
+  const l = Int32Array.from(keys, (key) => key[0]);
+  const g = Float64Array.from(keys, (key) => key[1]);
+  const eta = Float64Array.from(keys, (key) => key[2]);
+  const epsilon = Float64Array.from(keys, (key) => key[3]);
+  const powers = new Float64Array(1 + Math.max(highestDegree, ...l));
   const e = new Float64Array(size);
-  const slope = new Float64Array(size);
-  const bend = new Float64Array(size);
+  const x1 = new Float64Array(size);
+  const x2 = new Float64Array(size);
   let last = Number.NaN;
   return {
-    value,
-    first,
-    second,
+    powers,
+    e,
+    x1,
+    x2,
     at(delta: number): void {
       if (delta === last) return;
       last = delta;
       powers[0] = 1;
-      for (let k = 1; k <= highest; k++) powers[k] = (powers[k - 1] as number) * delta;
+      for (let k = 1; k < powers.length; k++) powers[k] = (powers[k - 1] as number) * delta;
       for (let j = 0; j < size; j++) {
         const gj = g[j] as number;
         const ej = eta[j] as number;
@@ -259,26 +326,18 @@ function densityFunctions(keys: readonly DensityKey[]) {
           const lj = l[j] as number;
           const power = gj * (powers[lj] as number);
           e[j] = Math.exp(-power);
-          slope[j] = -lj * power;
-          bend[j] = -lj * lj * power;
+          x1[j] = -lj * power;
+          x2[j] = -lj * lj * power;
         } else if (ej !== 0) {
           const away = delta - (epsilon[j] as number);
           e[j] = Math.exp(-ej * away * away);
-          slope[j] = -2 * ej * delta * away;
-          bend[j] = -2 * ej * delta * (delta + away);
+          x1[j] = -2 * ej * delta * away;
+          x2[j] = -2 * ej * delta * (delta + away);
         } else {
           e[j] = 1;
-          slope[j] = 0;
-          bend[j] = 0;
+          x1[j] = 0;
+          x2[j] = 0;
         }
-      }
-      for (let k = 0; k < keys.length; k++) {
-        const j = factorOf[k] as number;
-        const d = degree[k] as number;
-        const s = d + (slope[j] as number);
-        value[k] = (powers[d] as number) * (e[j] as number);
-        first[k] = s;
-        second[k] = s * s - s + (bend[j] as number);
       }
     },
   };

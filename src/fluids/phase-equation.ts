@@ -1,6 +1,6 @@
 /** One fluid's equation of state with its saturation line: which branch a temperature and pressure lie on, and the density there. */
-import { type Ancillary, ancillaryAt } from "./ancillary.js";
-import { cubicCompressibility, densityOn } from "./density.js";
+import { type Ancillary, ancillary } from "./ancillary.js";
+import { compressedDensity, cubicCompressibility, densityOn } from "./density.js";
 import { type Helmholtz, helmholtz } from "./helmholtz.js";
 import type { PureRecord } from "./pure-record.js";
 import { type Coexistence, coexistence } from "./vapour-pressure.js";
@@ -13,13 +13,13 @@ export interface SaturationPoint {
   readonly dewPressure: number;
 }
 
+/** Which side of the saturation line; "beyond" above its end, "between" on a pure fluid's line or inside a blend's dome. */
 export type Side = "liquid" | "gas" | "beyond" | "between";
 
 export interface PhaseEquation {
   readonly equation: Helmholtz;
   /** K; above it there is one fluid phase only. */
   readonly domeTop: number;
-  /** Which side of the saturation line; "beyond" above its end, "between" on a pure fluid's line or inside a blend's dome. */
   sideOf(T: number, p: number): Side;
   /** mol/m³ on that side; undefined where the equation holds none. */
   density(T: number, p: number, side: Side): number | undefined;
@@ -38,69 +38,71 @@ const onLine = 1e-7;
 
 export function phaseEquation(record: PureRecord): PhaseEquation {
   const equation = helmholtz(record.residual);
-  const { reducing, gasConstant, saturation: lines } = record;
-  const blend = lines.dewPressure !== undefined;
-  const domeTop = blend ? lines.pressure.T : record.critical.T;
+  const { reducing, gasConstant, critical } = record;
+  const linePressure = lastOf(ancillary(record.saturation.pressure));
+  const dewPressure = record.saturation.dewPressure && ancillary(record.saturation.dewPressure);
+  const liquidLine = ancillary(record.saturation.liquid);
+  const vapourLine = ancillary(record.saturation.vapour);
+  const domeTop = dewPressure ? record.saturation.pressure.T : critical.T;
   const scale = reducing.rho * gasConstant;
-  const acentric = acentricFactor(lines.pressure, record.critical.T, record.critical.p);
+  const acentric = acentricFactor(record.saturation.pressure, critical.T, critical.p);
 
-  let lastT = Number.NaN;
-  let lastPair: Coexistence | undefined;
-  const pairAt = (T: number): Coexistence | undefined => {
-    if (T === lastT) return lastPair;
-    lastT = T;
-    const liquid = ancillaryAt(lines.liquid, T) / reducing.rho;
-    const vapour = ancillaryAt(lines.vapour, T) / reducing.rho;
-    lastPair = T >= domeTop ? undefined : coexistence(equation, reducing.T / T, liquid, vapour);
-    return lastPair;
+  const pairAt = lastOf((T: number): Coexistence | undefined =>
+    T >= domeTop ? undefined : coexistence(equation, reducing.T / T, liquidLine(T) / reducing.rho, vapourLine(T) / reducing.rho),
+  );
+
+  const isFar = (T: number, p: number): boolean => {
+    const ratio = p / linePressure(T);
+    return T < closeTo * domeTop ? Math.abs(ratio - 1) > margin : ratio < 0.5 || ratio > 2;
   };
 
   const sideOf = (T: number, p: number): Side => {
     if (T >= domeTop) return "beyond";
-    const rough = ancillaryAt(lines.pressure, T);
-    if (lines.dewPressure) {
+    const rough = linePressure(T);
+    if (dewPressure) {
       if (p >= rough) return "liquid";
-      return p <= ancillaryAt(lines.dewPressure, T) ? "gas" : "between";
+      return p <= dewPressure(T) ? "gas" : "between";
     }
-    if (isFar(T, p, rough)) return p > rough ? "liquid" : "gas";
+    if (isFar(T, p)) return p > rough ? "liquid" : "gas";
     const pair = pairAt(T);
     const exact = pair ? pair.pressure * scale * T : rough;
     if (Math.abs(p - exact) < onLine * exact) return "between";
     return p > exact ? "liquid" : "gas";
   };
 
-  const isFar = (T: number, p: number, rough: number): boolean => {
-    const ratio = p / rough;
-    return T < closeTo * domeTop ? Math.abs(ratio - 1) > margin : ratio < 0.5 || ratio > 2;
-  };
-
   const density = (T: number, p: number, side: Side): number | undefined => {
-    const tau = reducing.T / T;
     const target = p / (scale * T);
-    const found = side === "beyond" ? beyond(tau, target, T, p) : (beside(tau, target, T, p, side) ?? nearTop(tau, target, T, p));
+    const found = side === "beyond" ? beyond(T, p, target) : (beside(T, p, target, side) ?? nearTop(T, p, target));
     return found === undefined ? undefined : found * reducing.rho;
   };
 
-  const beyond = (tau: number, target: number, T: number, p: number): number | undefined => {
-    const start = target / cubicCompressibility(T / record.critical.T, p / record.critical.p, acentric);
-    return densityOn(equation, tau, target, { low: 0, high: Number.POSITIVE_INFINITY, start });
-  };
+  const cubicDensity = (T: number, p: number, target: number): number =>
+    target / cubicCompressibility(T / critical.T, p / critical.p, acentric);
+
+  const beyond = (T: number, p: number, target: number): number | undefined =>
+    densityOn(equation, reducing.T / T, target, { low: 0, high: Number.POSITIVE_INFINITY, start: cubicDensity(T, p, target) });
 
   /** Close under the dome's top the short equations for the branches can miss; there the whole isotherm is searched. */
-  const nearTop = (tau: number, target: number, T: number, p: number): number | undefined =>
-    T > 0.98 * domeTop ? beyond(tau, target, T, p) : undefined;
+  const nearTop = (T: number, p: number, target: number): number | undefined => (T > 0.98 * domeTop ? beyond(T, p, target) : undefined);
 
-  const beside = (tau: number, target: number, T: number, p: number, side: Side): number | undefined => {
-    const near = !blend && !isFar(T, p, ancillaryAt(lines.pressure, T));
+  const beside = (T: number, p: number, target: number, side: Side): number | undefined => {
+    const tau = reducing.T / T;
+    const near = !dewPressure && !isFar(T, p);
     const pair = near ? pairAt(T) : undefined;
-    if (near && !pair) return beyond(tau, target, T, p);
+    if (near && !pair) return beyond(T, p, target);
     if (side === "gas") {
-      const high = pair ? pair.vapour * (1 + 1e-9) : (1.1 * ancillaryAt(lines.vapour, T)) / reducing.rho;
-      const start = target / cubicCompressibility(T / record.critical.T, p / record.critical.p, acentric);
-      return densityOn(equation, tau, target, { low: 0, high, start: Math.min(start, high) });
+      const high = pair ? pair.vapour * (1 + 1e-9) : (1.1 * vapourLine(T)) / reducing.rho;
+      return densityOn(equation, tau, target, { low: 0, high, start: Math.min(cubicDensity(T, p, target), high) });
     }
-    const low = pair ? pair.liquid * (1 - 1e-9) : (0.95 * ancillaryAt(lines.liquid, T)) / reducing.rho;
-    return densityOn(equation, tau, target, { low, high: Number.POSITIVE_INFINITY, start: pair ? low : low / 0.95 });
+    const low = pair ? pair.liquid * (1 - 1e-9) : (0.95 * liquidLine(T)) / reducing.rho;
+    return densityOn(equation, tau, target, { low, high: Number.POSITIVE_INFINITY, start: compressedDensity(equation, tau, target, pair ? pair.liquid : low / 0.95) });
+  };
+
+  const blendSaturation = (T: number, bubble: number, dew: number): SaturationPoint | undefined => {
+    if (T >= domeTop) return undefined;
+    const liquid = density(T, bubble, "liquid");
+    const vapour = density(T, dew, "gas");
+    return liquid === undefined || vapour === undefined ? undefined : { liquid, vapour, pressure: bubble, dewPressure: dew };
   };
 
   return {
@@ -108,25 +110,31 @@ export function phaseEquation(record: PureRecord): PhaseEquation {
     domeTop,
     sideOf,
     density,
-    roughPressure: (T) => ancillaryAt(lines.pressure, T),
+    roughPressure: linePressure,
     saturation(T) {
-      if (lines.dewPressure) return blendSaturation(T, ancillaryAt(lines.pressure, T), ancillaryAt(lines.dewPressure, T));
+      if (dewPressure) return blendSaturation(T, linePressure(T), dewPressure(T));
       const pair = pairAt(T);
       if (!pair) return undefined;
       const pressure = pair.pressure * scale * T;
       return { liquid: pair.liquid * reducing.rho, vapour: pair.vapour * reducing.rho, pressure, dewPressure: pressure };
     },
   };
+}
 
-  function blendSaturation(T: number, bubble: number, dew: number): SaturationPoint | undefined {
-    if (T >= domeTop) return undefined;
-    const liquid = density(T, bubble, "liquid");
-    const vapour = density(T, dew, "gas");
-    return liquid === undefined || vapour === undefined ? undefined : { liquid, vapour, pressure: bubble, dewPressure: dew };
-  }
+/** Keeps the last result, since one state asks for the same temperature several times. It changes no result. */
+function lastOf<R>(evaluate: (T: number) => R): (T: number) => R {
+  let lastT = Number.NaN;
+  let last: R;
+  return (T) => {
+    if (T !== lastT) {
+      last = evaluate(T);
+      lastT = T;
+    }
+    return last;
+  };
 }
 
 /** ω = −lg(p/pc) − 1 at 0.7 Tc, Pitzer's definition, from the short equation. */
 function acentricFactor(pressure: Ancillary, Tc: number, pc: number): number {
-  return -Math.log10(ancillaryAt(pressure, 0.7 * Tc) / pc) - 1;
+  return -Math.log10(ancillary(pressure)(0.7 * Tc) / pc) - 1;
 }

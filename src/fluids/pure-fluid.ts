@@ -1,6 +1,6 @@
 /** A fluid of the shelf from its record: equation of state, transport, saturation, limits and what to say about them. */
 import { coverageProblem, isProblem, type Problem } from "../quantities/problems.js";
-import { ancillaryAt } from "./ancillary.js";
+import { ancillary } from "./ancillary.js";
 import { type ConductivityParts, conductivityOf, denseConductivityOf } from "./conductivity.js";
 import { conformalSearch, type ReferenceFluid, type Relation } from "./corresponding-states.js";
 import type { Fluid, FluidRange, Phase, Saturation, State, Uncertainty } from "./fluid.js";
@@ -101,7 +101,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     return T >= record.critical.T && p >= record.critical.p ? "supercritical" : "gas";
   };
 
-  const scratch: TransportState = { T: 0, rho: 0, p: 0, pT: 0, pRho: 0, cp: 0, cv: 0, idealTT: 0 };
+  const scratch: TransportState = { T: 0, rho: 0, p: 0, pT: 0, pRho: 0, cp: 0, cv: 0, alpha: 0, alphaD: 0, idealTT: 0 };
 
   const stateAt = (T: number, p: number, rho: number, phase: Phase): State | Problem => {
     const r = phases.equation.residual(reducing.T / T, rho / reducing.rho);
@@ -118,6 +118,8 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     scratch.pRho = R * T * slope;
     scratch.cp = cp;
     scratch.cv = cv;
+    scratch.alpha = r.a;
+    scratch.alphaD = r.d;
     scratch.idealTT = i.tt;
     const enthalpy = (R * T * (1 + i.t + r.t + r.d)) / molarMass;
     const speedOfSound = Math.sqrt(((R * T) / molarMass) * slope * (cp / cv));
@@ -291,7 +293,7 @@ function transportOf(record: PureRecord, substance: Substance, references: Refer
     const known = relations.get(name);
     if (known) return known;
     const reference = referenceFluid(references(name));
-    const relation = { reference, search: conformalSearch(substance, helmholtz(record.residual), reference) };
+    const relation = { reference, search: conformalSearch(substance, reference) };
     relations.set(name, relation);
     return relation;
   };
@@ -301,7 +303,7 @@ function transportOf(record: PureRecord, substance: Substance, references: Refer
     viscosity,
     equation: () => helmholtz(record.residual),
     relate,
-    vapourDensity: (T) => ancillaryAt(record.saturation.vapour, T),
+    vapourDensity: ancillary(record.saturation.vapour),
   };
   const conductivity = conductivityOf(record.conductivity, parts);
   const [coldest, hottest] = record.viscosityT ?? record.T;

@@ -16,6 +16,9 @@ export interface TransportState {
   cp: number;
   /** J/(mol·K) */
   cv: number;
+  /** Residual Helmholtz energy α and δα_δ */
+  alpha: number;
+  alphaD: number;
   /** τ²α0_ττ of the ideal gas: cp0 = R (1 − τ²α0_ττ) */
   idealTT: number;
 }
@@ -45,13 +48,6 @@ export type Conductivity = (state: TransportState, viscosity: number) => number;
 export const avogadro = 6.02214129e23;
 /** J/K, CODATA 2010, the one that the reference values of the critical enhancement here were made with. */
 export const boltzmann = 1.3806488e-23;
-
-/** Σ a x^t over rows [a, t]; plain integer powers and zero are not sent through the power function. */
-export function polynomial(rows: readonly (readonly [a: number, t: number])[], x: number): number {
-  let sum = 0;
-  for (const [a, t] of rows) sum += t === 0 ? a : t === 1 ? a * x : a * x ** t;
-  return sum;
-}
 
 /** Ω(2,2)* of the Lennard-Jones 12-6 gas after Neufeld, Janzen & Aziz 1972, without the sine term. */
 export function neufeldIntegral(Tstar: number): number {

@@ -1,5 +1,6 @@
 /** Viscosity correlations of a shape that one paper has for one fluid. */
-import { avogadro, neufeldIntegral, polynomial, type Substance, type TransportState, type Viscosity } from "./transport.js";
+import { powerSum } from "./power-sum.js";
+import { avogadro, neufeldIntegral, type Substance, type TransportState, type Viscosity } from "./transport.js";
 
 type Numbers = readonly number[];
 
@@ -107,17 +108,28 @@ function heavyWater(record: HeavyWaterViscosity, { molarMass }: Substance): Visc
     const below = record.A.reduce((sum, a, i) => sum + a / Tb ** i, 0);
     return (record.viscosity * Math.sqrt(Tb)) / below;
   };
+  // Rows turned into powers of the two differences, which may be negative.
+  const terms = record.B.map(([B, I, J]) => ({ B, I, J }));
+  const xs = new Float64Array(1 + Math.max(...terms.map(({ I }) => I)));
+  const ys = new Float64Array(1 + Math.max(...terms.map(({ J }) => J)));
   return {
     dilute,
     excess({ T, rho }) {
       const rb = (rho * molarMass) / record.density;
       const x = record.T / T - 1;
       const y = rb - 1;
+      fillPowers(xs, x);
+      fillPowers(ys, y);
       let sum = 0;
-      for (const [B, I, J] of record.B) sum += B * x ** I * y ** J;
+      for (const { B, I, J } of terms) sum += B * (xs[I] as number) * (ys[J] as number);
       return dilute(T) * Math.expm1(rb * sum);
     },
   };
+}
+
+function fillPowers(powers: Float64Array, x: number): void {
+  powers[0] = 1;
+  for (let k = 1; k < powers.length; k++) powers[k] = (powers[k - 1] as number) * x;
 }
 
 /** The dilute value and the liquid's value joined over concentration, with a bell at the critical point; in the units of the record. */
@@ -146,6 +158,7 @@ function methanol(record: MethanolViscosity, { molarMass }: Substance): Viscosit
   const { a, c, d, e, b } = record;
   const dipole = record.dipole * record.dipole;
   const volume = avogadro * record.sigma ** 3;
+  const virial = powerSum(b);
   const dilute = (T: number): number => {
     const Ts = T / record.epsilon;
     const polar = a[1] * Ts ** a[2] + a[3] * Math.exp(a[4] * Ts) + a[5] * Math.exp(a[6] * Ts);
@@ -158,7 +171,7 @@ function methanol(record: MethanolViscosity, { molarMass }: Substance): Viscosit
       const Ts = T / record.epsilon;
       const Tr = T / record.T;
       const rr = (rho * molarMass) / record.density;
-      const second = volume * polynomial(b, Ts);
+      const second = volume * virial(Ts);
       const third = volume * volume * c[0] * Ts ** 3 * Math.exp(c[1] / Math.sqrt(Ts));
       let size = 0;
       for (let i = d.length - 1; i >= 0; i--) size = size / Tr + (d[i] as number);

@@ -1,4 +1,5 @@
 /** Dense viscosity η = δ^(2/3) √Tr · bracket, the shape of the reference correlations since 2012; δ and Tr on the record's own reducing point. */
+import { powerSum2 } from "./power-sum.js";
 import type { Substance, Viscosity } from "./transport.js";
 
 export interface ScaledDense {
@@ -60,9 +61,9 @@ function bracketOf(bracket: Bracket): (Tr: number, delta: number) => number {
 }
 
 function powersOf({ a, pole }: Extract<Bracket, { of: "powers" }>): (Tr: number, delta: number) => number {
+  const powers = powerSum2(a);
   return (Tr, delta) => {
-    let sum = 0;
-    for (const [n, b, c] of a) sum += n * (b === 0 ? 1 : Tr ** b) * (c === 0 ? 1 : delta ** c);
+    const sum = powers(Tr, delta);
     return pole ? sum + (pole[0] * delta) / (Tr * (pole[1] + pole[2] * delta)) : sum;
   };
 }

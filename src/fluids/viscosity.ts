@@ -4,7 +4,8 @@
  */
 import { type CorrespondingViscosity, correspondingViscosity, type Relation } from "./corresponding-states.js";
 import { type FrictionTheory, frictionTheory } from "./friction-theory.js";
-import { avogadro, kineticViscosity, polynomial, type Substance, type Viscosity } from "./transport.js";
+import { dampedSum, powerSum, powerSum2 } from "./power-sum.js";
+import { avogadro, kineticViscosity, type Substance, type Viscosity } from "./transport.js";
 import { type Chung, chung } from "./viscosity-chung.js";
 import { type NamedViscosity, namedViscosity } from "./viscosity-named.js";
 import { type ScaledDense, scaledDense } from "./viscosity-scaled.js";
@@ -116,16 +117,22 @@ function diluteOf(record: DiluteViscosity, pair: LennardJones | undefined, subst
     case "collision integral": {
       const { epsilon, sigma } = given(pair);
       const factor = (record.C * Math.sqrt(1000 * record.M)) / (1e18 * sigma * sigma);
-      return (T) => (factor * Math.sqrt(T)) / Math.exp(polynomial(record.a, Math.log(T / epsilon)));
+      const logIntegral = powerSum(record.a);
+      return (T) => (factor * Math.sqrt(T)) / Math.exp(logIntegral(Math.log(T / epsilon)));
     }
-    case "inverse collision integral":
-      return (T) => (record.C * Math.sqrt(T)) / polynomial(record.a, T / record.T);
+    case "inverse collision integral": {
+      const below = powerSum(record.a);
+      return (T) => (record.C * Math.sqrt(T)) / below(T / record.T);
+    }
     case "kinetic theory": {
       const { epsilon, sigma } = given(pair);
       return (T) => kineticViscosity(T, substance.molarMass, epsilon, sigma);
     }
-    case "ratio":
-      return (T) => polynomial(record.a, T / record.T) / polynomial(record.b, T / record.T);
+    case "ratio": {
+      const above = powerSum(record.a);
+      const below = powerSum(record.b);
+      return (T) => above(T / record.T) / below(T / record.T);
+    }
     case "log polynomial":
       return (T) => logPolynomial(record, T);
     case "cube roots":
@@ -158,10 +165,14 @@ export function logPolynomial(record: { readonly T: number; readonly A: number; 
 }
 
 function firstOf(record: FirstDensity, pair: LennardJones | undefined) {
-  if (record.form === "direct") return (T: number, rho: number): number => rho * polynomial(record.n, 1 / T);
+  if (record.form === "direct") {
+    const sum = powerSum(record.n);
+    return (T: number, rho: number): number => rho * sum(1 / T);
+  }
+  const sum = powerSum(record.b);
   const { epsilon, sigma } = given(record.lennardJones ?? pair);
   const volume = avogadro * sigma ** 3;
-  return (T: number, rho: number, dilute: (T: number) => number): number => dilute(T) * rho * volume * polynomial(record.b, T / epsilon);
+  return (T: number, rho: number, dilute: (T: number) => number): number => dilute(T) * rho * volume * sum(T / epsilon);
 }
 
 function denseOf(record: DenseViscosity, substance: Substance): Viscosity["excess"] {
@@ -173,11 +184,7 @@ function denseOf(record: DenseViscosity, substance: Substance): Viscosity["exces
     case "scaled":
       return scaledDense(record, substance);
     case "ratio":
-      return ({ T, rho }) => {
-        const delta = rho / record.rho;
-        const tau = record.T / T;
-        return (record.A * densities(record.g, delta, tau)) / (1 + densities(record.h, delta, tau));
-      };
+      return ratioOf(record);
     case "symbolic": {
       const [c0, c1, c2, c3, c4, c5] = record.c;
       return ({ T, rho }) => {
@@ -198,25 +205,38 @@ function denseOf(record: DenseViscosity, substance: Substance): Viscosity["exces
   }
 }
 
-function densities(rows: Rows3, delta: number, tau: number): number {
-  let sum = 0;
-  for (const [g, r, s] of rows) sum += g * delta ** r * (s === 0 ? 1 : tau ** s);
-  return sum;
+/** Rows as the paper has them, density before temperature, turned for the sum. */
+function turned(rows: Rows3): readonly (readonly [number, number, number])[] {
+  return rows.map(([g, r, s]) => [g, s, r] as const);
 }
 
-function batschinski(record: Batschinski): Viscosity["excess"] {
+function ratioOf(record: Extract<DenseViscosity, { form: "ratio" }>): Viscosity["excess"] {
+  const above = powerSum2(turned(record.g));
+  const below = powerSum2(turned(record.h));
   return ({ T, rho }) => {
     const delta = rho / record.rho;
     const tau = record.T / T;
-    let sum = 0;
-    for (const [a, t, d, gamma, l] of record.a) {
-      const part = a * (t === 0 ? 1 : tau ** t) * delta ** d;
-      sum += gamma === undefined ? part : part * Math.exp(gamma * delta ** (l as number));
-    }
-    if (!record.f || !record.g || !record.p) return sum;
-    const packed = polynomial(record.g, tau) / polynomial(record.p, tau);
-    let free = 0;
-    for (const [f, t, d] of record.f) free += f * (t === 0 ? 1 : tau ** t) * delta ** d;
-    return sum + free * (1 / (packed - delta) - 1 / packed);
+    return (record.A * above(tau, delta)) / (1 + below(tau, delta));
+  };
+}
+
+function batschinski(record: Batschinski): Viscosity["excess"] {
+  const terms = dampedSum(record.a.map(([a, t, d, gamma = 0, l = 0]) => [a, t, d, gamma, l] as const));
+  const free = record.f && record.g && record.p ? freeVolume(record.f, record.g, record.p) : undefined;
+  return ({ T, rho }) => {
+    const delta = rho / record.rho;
+    const tau = record.T / T;
+    return free ? terms(tau, delta) + free(tau, delta) : terms(tau, delta);
+  };
+}
+
+/** Σ f δ^d τ^t (1/(δ0 − δ) − 1/δ0). */
+function freeVolume(f: Rows3, g: Rows2, p: Rows2) {
+  const front = powerSum2(f);
+  const above = powerSum(g);
+  const below = powerSum(p);
+  return (tau: number, delta: number): number => {
+    const packed = above(tau) / below(tau);
+    return front(tau, delta) * (1 / (packed - delta) - 1 / packed);
   };
 }
