@@ -632,6 +632,12 @@ export const bibliography = {
   "mondejar-2015-jced-r1233zde": {
     cite: "Maria E. Mondejar; Mark O. McLinden; Eric W. Lemmon, Thermodynamic Properties of trans-1-Chloro-3,3,3-trifluoropropene (R1233zd(E)): Vapor Pressure, (p, rho, T) Behavior, and Speed of Sound Measurements, and Equation of State, J. Chem. Eng. Data, vol. 60, 2015, p. 2477-2489, doi:10.1021/acs.jced.5b00348",
   },
+  "monogenidou-2018-conductivity": {
+    cite: "S. A. Monogenidou, M. J. Assael, M. L. Huber, Reference correlation for the thermal conductivity of ammonia from the triple-point temperature to 680 K and pressures up to 80 MPa, J. Phys. Chem. Ref. Data 47 (2018) 043101",
+  },
+  "monogenidou-2018-viscosity": {
+    cite: "S. A. Monogenidou, M. J. Assael, M. L. Huber, Reference correlation for the viscosity of ammonia from the triple point to 725 K and up to 50 MPa, J. Phys. Chem. Ref. Data 47 (2018) 023102",
+  },
   "morgan-1975": {
     cite: "Morgan, V.T. Advances in Heat Transfer 11 (1975) 199-264",
   },
@@ -799,9 +805,6 @@ export const bibliography = {
   },
   "sanitjai-goldstein-2004": {
     cite: "Sanitjai, S.; Goldstein, R.J. Int. J. Heat Mass Transfer 47 (2004) 4795-4805",
-  },
-  "santamariaperez-2010-prb": {
-    cite: "David Santamaria-Perez; Goutam Dev Mukherjee; Beate Schwager; Reinhard Boehler, High-pressure melting curve of helium and neon: Deviations from corresponding states theory, Physical Review B, vol. 81, 2010, p. 214101:1-5, doi:10.1103/PhysRevB.81.214101",
   },
   schlichting: {
     cite: "Schlichting, H. Boundary-Layer Theory, McGraw-Hill",

@@ -118,7 +118,7 @@ function nearest(equation: Helmholtz, a: number, d: number, start: Reduced): Red
   let damping = 1e-3;
   let { a: ra, d: rd, t: aT, dt: dT, dd } = equation.residual(tau, delta);
   let miss = (ra - a) ** 2 + (rd - d) ** 2;
-  for (let count = 0; count < 20 && miss > 0; count++) {
+  for (let count = 0; count < 40 && miss > 0; count++) {
     const aD = rd;
     const dD = rd + dd;
     const slopeT = aT * (ra - a) + dT * (rd - d);

@@ -4,9 +4,9 @@
 export type MeltingPart =
   /** p = p0 + a ((T/T0)^c − 1) (Simon) */
   | { readonly form: "Simon"; readonly T: readonly [number, number]; readonly T0: number; readonly p0: number; readonly a: number; readonly c: number }
-  /** p = p0 + Σ a ((T/T0)^t − 1) */
+  /** p = p0 (1 + Σ a ((T/T0)^t − 1)) */
   | { readonly form: "powers of T"; readonly T: readonly [number, number]; readonly T0: number; readonly p0: number; readonly a: readonly (readonly [number, number])[] }
-  /** p = p0 + Σ a (T/T0 − 1)^t */
+  /** p = p0 (1 + Σ a (T/T0 − 1)^t) */
   | { readonly form: "powers of rise"; readonly T: readonly [number, number]; readonly T0: number; readonly p0: number; readonly a: readonly (readonly [number, number])[] };
 
 export type MeltingLine = readonly MeltingPart[];
@@ -23,9 +23,9 @@ function pressureOf(part: MeltingPart, T: number): number {
     case "Simon":
       return part.p0 + part.a * (ratio ** part.c - 1);
     case "powers of T":
-      return part.p0 + part.a.reduce((sum, [a, t]) => sum + a * (ratio ** t - 1), 0);
+      return part.p0 * part.a.reduce((sum, [a, t]) => sum + a * (ratio ** t - 1), 1);
     case "powers of rise":
-      return part.p0 + part.a.reduce((sum, [a, t]) => sum + a * Math.max(ratio - 1, 0) ** t, 0);
+      return part.p0 * part.a.reduce((sum, [a, t]) => sum + a * Math.max(ratio - 1, 0) ** t, 1);
   }
 }
 

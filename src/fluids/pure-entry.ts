@@ -1,6 +1,7 @@
 /** The shelf's line for a pure fluid: plain data from its record, the fluid itself when someone asks. */
 import type { Fluid } from "./fluid.js";
-import { pureFluid, pureRange, type ReferenceRecords } from "./pure-fluid.js";
+import { pureFluid, pureRange } from "./pure-fluid.js";
+import type { ReferenceRecords } from "./pure-model.js";
 import type { PureRecord } from "./pure-record.js";
 import type { ShelfEntry } from "./shelf-entry.js";
 

@@ -1,27 +1,16 @@
 /** A fluid of the shelf from its record: equation of state, transport, saturation, limits and what to say about them. */
 import { coverageProblem, isProblem, type Problem } from "../quantities/problems.js";
-import { ancillary } from "./ancillary.js";
-import { type ConductivityParts, conductivityOf, denseConductivityOf } from "./conductivity.js";
-import { conformalSearch, type ReferenceFluid, type Relation } from "./corresponding-states.js";
 import type { Fluid, FluidRange, Phase, Saturation, State, Uncertainty } from "./fluid.js";
-import { helmholtz } from "./helmholtz.js";
-import { idealPart } from "./helmholtz-ideal.js";
 import { meltingPressure, meltingTemperature } from "./melting-line.js";
-import { phaseEquation, type SaturationPoint, type Side } from "./phase-equation.js";
+import type { SaturationPoint, Side } from "./phase-equation.js";
+import { pureModel, type ReferenceRecords } from "./pure-model.js";
 import type { PureRecord } from "./pure-record.js";
 import { impossible, isBelow, outside, sayPressure, sayTemperature } from "./refusal.js";
-import type { Substance, TransportState, Viscosity } from "./transport.js";
-import { viscosityOf } from "./viscosity.js";
-
-/** Records of the fluids that corresponding states refer to. */
-export type ReferenceRecords = (name: string) => PureRecord;
 
 /** Lowest pressure offered: a hundredth of a pascal is no continuum in any duct, but vapours of cold liquids reach it. */
 const thinnest = 1e-2;
 /** Published melting lines and triple points disagree by some hundredths of a kelvin, K. */
 const meltingSlack = 0.1;
-/** Above this ratio to the ideal gas's, cp says only that the critical point is near. */
-const divergentCp = 5000;
 
 export function pureRange(record: PureRecord): FluidRange {
   return { T: record.T, p: [thinnest, record.pMax] };
@@ -29,12 +18,10 @@ export function pureRange(record: PureRecord): FluidRange {
 
 export function pureFluid(record: PureRecord, references: ReferenceRecords): Fluid {
   const range = pureRange(record);
-  const substance: Substance = { molarMass: record.molarMass, gasConstant: record.gasConstant, reducing: record.reducing };
-  const phases = phaseEquation(record);
-  const ideal = idealPart(record.ideal, record.reducing.T);
-  const transport = transportOf(record, substance, references);
+  const model = pureModel(record, references);
+  const { phases } = model;
   const blend = record.saturation.dewPressure !== undefined;
-  const { molarMass, gasConstant: R, reducing, name } = record;
+  const { molarMass, name } = record;
   const capitalised = name.charAt(0).toUpperCase() + name.slice(1);
   const tripleOrLimit = record.T[0];
 
@@ -101,42 +88,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     return T >= record.critical.T && p >= record.critical.p ? "supercritical" : "gas";
   };
 
-  const scratch: TransportState = { T: 0, rho: 0, p: 0, pT: 0, pRho: 0, cp: 0, cv: 0, alpha: 0, alphaD: 0, idealTT: 0 };
-
-  const stateAt = (T: number, p: number, rho: number, phase: Phase): State | Problem => {
-    const r = phases.equation.residual(reducing.T / T, rho / reducing.rho);
-    const i = ideal(T);
-    const slope = 1 + 2 * r.d + r.dd;
-    const rise = 1 + r.d - r.dt;
-    const cv = -R * (i.tt + r.tt);
-    const cp = cv + (R * rise * rise) / slope;
-    if (!(slope > 0 && cv > 0 && cp < divergentCp * R)) return nearCritical(T, p);
-    scratch.T = T;
-    scratch.rho = rho;
-    scratch.p = p;
-    scratch.pT = R * rho * rise;
-    scratch.pRho = R * T * slope;
-    scratch.cp = cp;
-    scratch.cv = cv;
-    scratch.alpha = r.a;
-    scratch.alphaD = r.d;
-    scratch.idealTT = i.tt;
-    const enthalpy = (R * T * (1 + i.t + r.t + r.d)) / molarMass;
-    const speedOfSound = Math.sqrt(((R * T) / molarMass) * slope * (cp / cv));
-    const { viscosity, conductivity } = transport(scratch);
-    return {
-      T,
-      p,
-      phase,
-      density: rho * molarMass,
-      cp: cp / molarMass,
-      viscosity,
-      conductivity,
-      expansivity: rise / (T * slope),
-      enthalpy,
-      speedOfSound,
-    };
-  };
+  const stateAt = (T: number, p: number, rho: number, phase: Phase): State | Problem => model.state(T, p, rho, phase) ?? nearCritical(T, p);
 
   const state = (T: number, p: number): State | Problem => {
     const refused = locate(T, p);
@@ -228,6 +180,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     return Math.abs(T / Tc - 1) < 0.05 && p > 0.75 * pc && p < 1.6 * pc;
   };
 
+  const predictedFrom = predictedFromTemperature(record, references);
   const plain = uncertaintyOf(record, 1);
   const critical = uncertaintyOf(record, 10);
 
@@ -255,14 +208,30 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
       said.push(`Close to the critical point of ${name} properties change steeply and heat transfer can deteriorate; ordinary equations do not hold here.`);
     }
     if (record.predictive) said.push(`The ${record.predictive} of ${name} comes from a predictive method, good to 5 to 10 %.`);
+    if (T < predictedFrom) {
+      said.push(
+        `Below ${sayTemperature(predictedFrom)} the method that predicts transport of ${name} leaves its reference fluid's range; expect twice its uncertainty or more.`,
+      );
+    }
     const limits = record.viscosityT;
     if (limits && (T < limits[0] || T > limits[1])) {
       said.push(`The viscosity of ${name} holds from ${sayTemperature(limits[0])} to ${sayTemperature(limits[1])} only; none is given here.`);
     }
     if (!record.melting && p > 1e7 && T < 1.2 * tripleOrLimit) said.push(`No melting line of ${name} stands on the shelf: under this pressure it may be solid so close to its freezing point.`);
+    const here = record.viscosity && !limits ? state(T, p) : undefined;
+    if (here && !isProblem(here) && here.viscosity === undefined) {
+      said.push(`The published viscosity of ${name} does not reach this state; none is given here.`);
+    }
     if (!record.viscosity) said.push(`No published viscosity and conductivity of ${name} stand on the shelf: density and cp only.`);
     return said;
   }
+}
+
+/** K: where corresponding states reach the lowest temperature of the reference fluid; 0 where the method is not used. */
+function predictedFromTemperature({ viscosity, critical }: PureRecord, references: ReferenceRecords): number {
+  if (viscosity?.form !== "corresponding states") return 0;
+  const reference = references(viscosity.reference);
+  return (reference.T[0] / reference.critical.T) * critical.T;
 }
 
 function surfaceTension({ T: Tc, terms }: NonNullable<PureRecord["surfaceTension"]>, T: number): number {
@@ -280,61 +249,4 @@ function uncertaintyOf({ uncertainty }: PureRecord, factor: number): Uncertainty
     expansivity: share(uncertainty.cp + 2 * uncertainty.density),
     origin: uncertainty.origin,
   };
-}
-
-/** The object is the evaluator's own and changes at the next call. */
-type Transport = (state: TransportState) => { viscosity: number | undefined; conductivity: number | undefined };
-
-function transportOf(record: PureRecord, substance: Substance, references: ReferenceRecords): Transport {
-  const out: ReturnType<Transport> = { viscosity: undefined, conductivity: undefined };
-  if (!record.viscosity || !record.conductivity) return () => out;
-  const relations = new Map<string, Relation>();
-  const relate = (name: string): Relation => {
-    const known = relations.get(name);
-    if (known) return known;
-    const reference = referenceFluid(references(name));
-    const relation = { reference, search: conformalSearch(substance, reference) };
-    relations.set(name, relation);
-    return relation;
-  };
-  const viscosity = viscosityOf(record.viscosity, substance, relate);
-  const parts: ConductivityParts = {
-    substance,
-    viscosity,
-    equation: () => helmholtz(record.residual),
-    relate,
-    vapourDensity: ancillary(record.saturation.vapour),
-  };
-  const conductivity = conductivityOf(record.conductivity, parts);
-  const [coldest, hottest] = record.viscosityT ?? record.T;
-  return (state) => {
-    const full = positive(viscosity.dilute(state.T) + viscosity.excess(state));
-    out.viscosity = state.T < coldest || state.T > hottest ? undefined : full;
-    // Only the critical enhancement asks for the viscosity; where there is none, it is nothing.
-    out.conductivity = positive(conductivity(state, full ?? Number.POSITIVE_INFINITY));
-    return out;
-  };
-}
-
-/** A correlation led outside its own range can go below zero: then it says nothing. */
-function positive(value: number): number | undefined {
-  return value > 0 && value < Number.POSITIVE_INFINITY ? value : undefined;
-}
-
-function referenceFluid(record: PureRecord): ReferenceFluid {
-  const substance: Substance = { molarMass: record.molarMass, gasConstant: record.gasConstant, reducing: record.reducing };
-  const { viscosity, conductivity } = record;
-  if (!viscosity || conductivity?.form !== "sum" || !conductivity.dense) throw new Error(`${record.name} cannot serve as a reference fluid`);
-  return {
-    substance,
-    equation: helmholtz(record.residual),
-    viscosity: referenceViscosity(viscosity, substance),
-    denseConductivity: denseConductivityOf(conductivity.dense, substance),
-  };
-}
-
-function referenceViscosity(record: NonNullable<PureRecord["viscosity"]>, substance: Substance): Viscosity {
-  return viscosityOf(record, substance, () => {
-    throw new Error("a reference fluid has a viscosity of its own");
-  });
 }

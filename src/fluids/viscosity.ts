@@ -237,6 +237,8 @@ function freeVolume(f: Rows3, g: Rows2, p: Rows2) {
   const below = powerSum(p);
   return (tau: number, delta: number): number => {
     const packed = above(tau) / below(tau);
+    // Past the packed density the term means nothing.
+    if (delta >= packed) return Number.NaN;
     return front(tau, delta) * (1 / (packed - delta) - 1 / packed);
   };
 }

@@ -4,6 +4,7 @@ import type { PureRecord } from "../../pure-record.js";
 import type { ShelfEntry } from "../../shelf-entry.js";
 import { acetone } from "./acetone.js";
 import { ammonia } from "./ammonia.js";
+import { ammonia2018 } from "./ammonia-2018.js";
 import { argon } from "./argon.js";
 import { benzene } from "./benzene.js";
 import { carbonDioxide } from "./carbon-dioxide.js";
@@ -88,6 +89,7 @@ import { xenon } from "./xenon.js";
 const records: readonly PureRecord[] = [
   dryAir,
   ammonia,
+  ammonia2018,
   argon,
   carbonDioxide,
   carbonMonoxide,
