@@ -1,13 +1,18 @@
 /** Conductivity correlations of a shape that one paper has for one fluid. */
 import type { ConductivityParts } from "./conductivity.js";
 import { powerSum, powerSum2 } from "./power-sum.js";
-import { type Conductivity, type Substance, type TransportState } from "./transport.js";
+import type { Conductivity, Substance, TransportState } from "./transport.js";
 import { type ResidualConcentration, residualConcentration } from "./viscosity-named.js";
 
 type Numbers = readonly number[];
 type Rows3 = readonly (readonly [g: number, r: number, s: number])[];
 
-export type ConductivityNamed = { readonly form: "named" } & (HeliumConductivity | HeavyWaterConductivity | R23Conductivity | MethaneConductivity);
+export type ConductivityNamed = { readonly form: "named" } & (
+  | HeliumConductivity
+  | HeavyWaterConductivity
+  | R23Conductivity
+  | MethaneConductivity
+);
 
 /** Hands & Arp 1981, with its critical term between 3.5 and 12 K. */
 interface HeliumConductivity {
@@ -70,7 +75,17 @@ export function namedConductivity(record: ConductivityNamed, parts: Conductivity
 
 function helium({ s, c }: HeliumConductivity, { molarMass }: Substance): Conductivity {
   const [c0, c1, c2, c3, c4, c5, c6, c7, c8, c9, c10] = c as readonly [
-    number, number, number, number, number, number, number, number, number, number, number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
   ];
   return (state, viscosity) => {
     const { T } = state;

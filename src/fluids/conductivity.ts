@@ -7,7 +7,7 @@ import { type CorrespondingConductivity, correspondingConductivity, type Relatio
 import { type CriticalEnhancement, criticalEnhancement } from "./critical-enhancement.js";
 import type { Helmholtz } from "./helmholtz.js";
 import { dampedSum, powerSum, powerSum2 } from "./power-sum.js";
-import { type Conductivity, type Substance, type TransportState, type Viscosity } from "./transport.js";
+import type { Conductivity, Substance, TransportState, Viscosity } from "./transport.js";
 import { logPolynomial } from "./viscosity.js";
 
 type Rows2 = readonly (readonly [a: number, t: number])[];
@@ -26,7 +26,12 @@ export type DiluteConductivity =
 
 export type DenseConductivity =
   /** Σ B (Tr/T)^t (ρ/ρr)^d, density in kg/m³ */
-  | { readonly form: "polynomial"; readonly T: number; readonly density: number; readonly B: readonly (readonly [B: number, t: number, d: number])[] }
+  | {
+      readonly form: "polynomial";
+      readonly T: number;
+      readonly density: number;
+      readonly B: readonly (readonly [B: number, t: number, d: number])[];
+    }
   /** Σ A τ^t δ^d exp(−γ δ^l) on the reducing point, Lemmon & Jacobsen 2004 */
   | { readonly form: "exponentials"; readonly A: readonly (readonly [A: number, t: number, d: number, l: number])[] };
 

@@ -60,8 +60,8 @@ export interface Relation {
   readonly search: ConformalSearch;
 }
 
-/** Newton's method converges quadratically: behind this relative step the conformal state is good to 1e-9. */
-const settled = 1e-5;
+/** Newton's method converges quadratically: behind this relative step the conformal state is good to 1e-7. */
+const settled = 1e-4;
 /** A conformal temperature further off than this (in ln T) belongs to another root. */
 const furthest = 0.9;
 
@@ -145,7 +145,7 @@ function nearest(equation: Helmholtz, a: number, d: number, start: Reduced): Red
     delta = nextDelta;
     const gained = miss - nextMiss;
     miss = nextMiss;
-    if (gained < 1e-4 * miss) break;
+    if (gained < 1e-3 * miss) break;
     ({ a: ra, d: rd, t: aT, dt: dT, dd } = next);
   }
   return { tau, delta };
@@ -200,5 +200,16 @@ function scaling(T: number, rho: number, conformal: Conformal): number {
 }
 
 function emptyState(): TransportState {
-  return { T: 0, rho: 0, p: Number.NaN, pT: Number.NaN, pRho: Number.NaN, cp: Number.NaN, cv: Number.NaN, alpha: Number.NaN, alphaD: Number.NaN, idealTT: Number.NaN };
+  return {
+    T: 0,
+    rho: 0,
+    p: Number.NaN,
+    pT: Number.NaN,
+    pRho: Number.NaN,
+    cp: Number.NaN,
+    cv: Number.NaN,
+    alpha: Number.NaN,
+    alphaD: Number.NaN,
+    idealTT: Number.NaN,
+  };
 }

@@ -35,7 +35,11 @@ export function criticalEnhancement(record: CriticalEnhancement, substance: Subs
   }
 }
 
-function olchowySengers(record: Extract<CriticalEnhancement, { form: "Olchowy-Sengers" }>, substance: Substance, equation: Helmholtz): Conductivity {
+function olchowySengers(
+  record: Extract<CriticalEnhancement, { form: "Olchowy-Sengers" }>,
+  substance: Substance,
+  equation: Helmholtz,
+): Conductivity {
   const { reducing, gasConstant } = substance;
   const { R0 = 1.03, gamma = 1.239, nu = 0.63, Gamma = 0.0496, zeta0 = 1.94e-10, qD = 2e9 } = record;
   const far = record.T ?? 1.5 * reducing.T;

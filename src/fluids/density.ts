@@ -34,7 +34,8 @@ export function densityOn(equation: Helmholtz, tau: number, target: number, bran
     const newton = slope > 0 ? x - excess / slope : Number.NaN;
     if (Math.abs(newton - x) <= 1e-14 * x) return x;
     // The bracket has closed: on the root, or on an end of a branch that does not reach the pressure.
-    if (high - low <= 4e-16 * high && high < Number.POSITIVE_INFINITY) return Math.abs(excess) <= 1e-9 * Math.max(target, x) ? x : undefined;
+    if (high - low <= 4e-16 * high && high < Number.POSITIVE_INFINITY)
+      return Math.abs(excess) <= 1e-9 * Math.max(target, x) ? x : undefined;
     const inside = newton > low && newton < high;
     const slow = count > 3 && Math.abs(newton - x) > 0.5 * stepBefore;
     // Newton's method converges quadratically: behind a step of 1e-8 only rounding is left.

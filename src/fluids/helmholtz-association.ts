@@ -17,7 +17,7 @@ export function association({ a, m, epsilon, kappa, vbar }: Association) {
       const half = eta / 2 / (1 - eta / 2);
       const rest = eta / (1 - eta);
       const grown = Math.exp(epsilon * tau);
-      const y = (((delta * (1 - eta / 2)) / (1 - eta) ** 3) * kappa) * (grown - 1);
+      const y = ((delta * (1 - eta / 2)) / (1 - eta) ** 3) * kappa * (grown - 1);
       const s = Math.sqrt(1 + 4 * y);
       const X = 2 / (1 + s);
       const yA1 = (-a * m * X * X * y) / 2;

@@ -21,7 +21,8 @@ export function nonAnalytic(terms: readonly NonAnalyticTerm[]) {
   return {
     /** Adds all six derivatives; those that the caller did not ask for are simply left behind. */
     add(tau: number, delta: number, out: Residual): void {
-      for (const term of terms) addTerm(term, Math.abs(tau - 1) < aside ? 1 + aside : tau, Math.abs(delta - 1) < aside ? 1 + aside : delta, out);
+      for (const term of terms)
+        addTerm(term, Math.abs(tau - 1) < aside ? 1 + aside : tau, Math.abs(delta - 1) < aside ? 1 + aside : delta, out);
     },
   };
 }

@@ -94,7 +94,10 @@ export function helmholtz(record: ResidualRecord): Helmholtz {
   const placeOf = Int32Array.from(groups.list, (_, k) => order.indexOf(k));
   const groupOf = groups.of.map((group) => placeOf[group] as number);
   const degrees = Int32Array.from(order, (k) => (groups.list[k] as readonly [number, number])[1]);
-  const starts = Int32Array.from([...factors.list.keys(), factors.list.length], (j) => order.filter((k) => (groups.list[k] as readonly [number, number])[0] < j).length);
+  const starts = Int32Array.from(
+    [...factors.list.keys(), factors.list.length],
+    (j) => order.filter((k) => (groups.list[k] as readonly [number, number])[0] < j).length,
+  );
 
   const amounts = Float64Array.from(terms, (term) => term.n);
   const isotherm = isothermSums(temperatures.list, amounts, temperatures.of, groupOf, order.length);

@@ -3,11 +3,30 @@
 /** One stretch of the line; temperatures in K, pressures in Pa. */
 export type MeltingPart =
   /** p = p0 + a ((T/T0)^c − 1) (Simon) */
-  | { readonly form: "Simon"; readonly T: readonly [number, number]; readonly T0: number; readonly p0: number; readonly a: number; readonly c: number }
+  | {
+      readonly form: "Simon";
+      readonly T: readonly [number, number];
+      readonly T0: number;
+      readonly p0: number;
+      readonly a: number;
+      readonly c: number;
+    }
   /** p = p0 (1 + Σ a ((T/T0)^t − 1)) */
-  | { readonly form: "powers of T"; readonly T: readonly [number, number]; readonly T0: number; readonly p0: number; readonly a: readonly (readonly [number, number])[] }
+  | {
+      readonly form: "powers of T";
+      readonly T: readonly [number, number];
+      readonly T0: number;
+      readonly p0: number;
+      readonly a: readonly (readonly [number, number])[];
+    }
   /** p = p0 (1 + Σ a (T/T0 − 1)^t) */
-  | { readonly form: "powers of rise"; readonly T: readonly [number, number]; readonly T0: number; readonly p0: number; readonly a: readonly (readonly [number, number])[] };
+  | {
+      readonly form: "powers of rise";
+      readonly T: readonly [number, number];
+      readonly T0: number;
+      readonly p0: number;
+      readonly a: readonly (readonly [number, number])[];
+    };
 
 export type MeltingLine = readonly MeltingPart[];
 

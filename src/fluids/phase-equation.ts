@@ -95,7 +95,11 @@ export function phaseEquation(record: PureRecord): PhaseEquation {
       return densityOn(equation, tau, target, { low: 0, high, start: Math.min(cubicDensity(T, p, target), high) });
     }
     const low = pair ? pair.liquid * (1 - 1e-9) : (0.95 * liquidLine(T)) / reducing.rho;
-    return densityOn(equation, tau, target, { low, high: Number.POSITIVE_INFINITY, start: compressedDensity(equation, tau, target, pair ? pair.liquid : low / 0.95) });
+    return densityOn(equation, tau, target, {
+      low,
+      high: Number.POSITIVE_INFINITY,
+      start: compressedDensity(equation, tau, target, pair ? pair.liquid : low / 0.95),
+    });
   };
 
   const blendSaturation = (T: number, bubble: number, dew: number): SaturationPoint | undefined => {

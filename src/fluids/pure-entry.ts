@@ -23,7 +23,9 @@ export function pureEntry(record: PureRecord, references: ReferenceRecords): She
 }
 
 function summaryOf(record: PureRecord): string {
-  const kind = record.saturation.dewPressure ? "Gas and liquid as a pseudo-pure fluid, refused between bubble and dew line" : "Gas, liquid and beyond the critical point";
+  const kind = record.saturation.dewPressure
+    ? "Gas and liquid as a pseudo-pure fluid, refused between bubble and dew line"
+    : "Gas, liquid and beyond the critical point";
   if (!record.viscosity) return `${kind}, by a multiparameter equation of state; density and cp only, no transport.`;
   const transport = record.predictive ? `published transport (${record.predictive} predicted, 5 to 10 %)` : "published transport";
   return `${kind}, by a multiparameter equation of state with ${transport}.`;

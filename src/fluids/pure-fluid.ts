@@ -22,7 +22,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
   const { phases } = model;
   const blend = record.saturation.dewPressure !== undefined;
   const { molarMass, name } = record;
-  const capitalised = name.charAt(0).toUpperCase() + name.slice(1);
+  const capitalised = /^[a-z]-/.test(name) ? name : name.charAt(0).toUpperCase() + name.slice(1);
   const tripleOrLimit = record.T[0];
 
   const refusal = (T: number, p: number): Problem | undefined => {
@@ -134,7 +134,8 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     return isProblem(T) ? T : saturationAtTemperature(T);
   };
 
-  const saturationPressure = (T: number): number => (blend ? phases.roughPressure(T) : (phases.saturation(T)?.pressure ?? phases.roughPressure(T)));
+  const saturationPressure = (T: number): number =>
+    blend ? phases.roughPressure(T) : (phases.saturation(T)?.pressure ?? phases.roughPressure(T));
 
   /** By regula falsi in ln p against 1/T, where the line is nearly straight (Illinois variant, bracketed). */
   const saturationTemperature = (p: number): number | Problem => {
@@ -192,7 +193,7 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     range,
     molarMass,
     critical: record.critical,
-    freezingPoint: tripleOrLimit,
+    freezingPoint: record.beginsAtFreezing === false ? undefined : tripleOrLimit,
     constantDensity: false,
     state,
     density,
@@ -205,7 +206,9 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
   function cautionsAt(T: number, p: number): readonly string[] {
     const said = [...record.cautions];
     if (close(T, p)) {
-      said.push(`Close to the critical point of ${name} properties change steeply and heat transfer can deteriorate; ordinary equations do not hold here.`);
+      said.push(
+        `Close to the critical point of ${name} properties change steeply and heat transfer can deteriorate; ordinary equations do not hold here.`,
+      );
     }
     if (record.predictive) said.push(`The ${record.predictive} of ${name} comes from a predictive method, good to 5 to 10 %.`);
     if (T < predictedFrom) {
@@ -215,9 +218,12 @@ export function pureFluid(record: PureRecord, references: ReferenceRecords): Flu
     }
     const limits = record.viscosityT;
     if (limits && (T < limits[0] || T > limits[1])) {
-      said.push(`The viscosity of ${name} holds from ${sayTemperature(limits[0])} to ${sayTemperature(limits[1])} only; none is given here.`);
+      said.push(
+        `The viscosity of ${name} holds from ${sayTemperature(limits[0])} to ${sayTemperature(limits[1])} only; none is given here.`,
+      );
     }
-    if (!record.melting && p > 1e7 && T < 1.2 * tripleOrLimit) said.push(`No melting line of ${name} stands on the shelf: under this pressure it may be solid so close to its freezing point.`);
+    if (!record.melting && p > 1e7 && T < 1.2 * tripleOrLimit)
+      said.push(`No melting line of ${name} stands on the shelf: under this pressure it may be solid so close to its freezing point.`);
     const here = record.viscosity && !limits ? state(T, p) : undefined;
     if (here && !isProblem(here) && here.viscosity === undefined) {
       said.push(`The published viscosity of ${name} does not reach this state; none is given here.`);

@@ -104,7 +104,8 @@ function positive(value: number): number | undefined {
 function referenceFluid(record: PureRecord): ReferenceFluid {
   const substance: Substance = { molarMass: record.molarMass, gasConstant: record.gasConstant, reducing: record.reducing };
   const { viscosity, conductivity } = record;
-  if (!viscosity || conductivity?.form !== "sum" || !conductivity.dense) throw new Error(`${record.name} cannot serve as a reference fluid`);
+  if (!viscosity || conductivity?.form !== "sum" || !conductivity.dense)
+    throw new Error(`${record.name} cannot serve as a reference fluid`);
   return {
     substance,
     equation: helmholtz(record.residual),

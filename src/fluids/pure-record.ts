@@ -23,6 +23,8 @@ export interface PureRecord {
   readonly critical: { readonly T: number; readonly p: number };
   /** K: triple point, or where the equation begins; highest temperature. */
   readonly T: readonly [number, number];
+  /** False where the lowest temperature is the equation's limit and not the freezing point. */
+  readonly beginsAtFreezing?: false;
   /** Pa, highest pressure */
   readonly pMax: number;
   readonly ideal: IdealRecord;

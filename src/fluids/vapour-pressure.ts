@@ -41,7 +41,8 @@ export function coexistence(equation: Helmholtz, tau: number, liquidStart: numbe
     liquid += stepL;
     vapour += stepV;
     if (!(liquid > vapour)) return undefined;
-    if (Math.abs(stepL) < 1e-11 * liquid && Math.abs(stepV) < 1e-11 * vapour) return { liquid, vapour, pressure: pressureAt(equation, tau, vapour) };
+    if (Math.abs(stepL) < 1e-11 * liquid && Math.abs(stepV) < 1e-11 * vapour)
+      return { liquid, vapour, pressure: pressureAt(equation, tau, vapour) };
   }
   return undefined;
 }

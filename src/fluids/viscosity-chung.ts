@@ -34,7 +34,16 @@ export function chung(record: Chung, _substance: Substance): Viscosity {
   const mass = 1000 * record.molarMass;
   const polar = (131.3 * record.dipole) / Math.sqrt(volume * record.T);
   const [e1, e2, e3, e4, e5, e6, e7, e8, e9, e10] = table.map(([a0, a1, a2]) => a0 + a1 * record.acentric + a2 * polar ** 4) as [
-    number, number, number, number, number, number, number, number, number, number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
   ];
   const shape = 1 - 0.2756 * record.acentric + 0.059035 * polar ** 4;
   const epsilon = record.T / 1.2593;

@@ -45,7 +45,17 @@ export function scaledDense(record: ScaledDense, substance: Substance): Viscosit
 
 function bracketOf(bracket: Bracket): (Tr: number, delta: number) => number {
   if (bracket.of === "powers") return powersOf(bracket);
-  const [c0, c1, c2, c3, c4, c5, c6, c7, c8] = bracket.c as readonly [number, number, number, number, number, number, number, number, number];
+  const [c0, c1, c2, c3, c4, c5, c6, c7, c8] = bracket.c as readonly [
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+    number,
+  ];
   switch (bracket.of) {
     case "acetone":
       return (Tr, d) => c0 * d + (c1 + c2 * d + c3 * d ** 5 + c4 * Tr * Tr * d ** 8) / (Tr + c5 * d);

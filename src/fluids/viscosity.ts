@@ -50,9 +50,21 @@ export type DenseViscosity =
   /** A Σ g δ^r τ^s/(1 + Σ h δ^r τ^s) */
   | { readonly form: "ratio"; readonly T: number; readonly rho: number; readonly A: number; readonly g: Rows3; readonly h: Rows3 }
   /** c0 δ² exp(c1 Tr + c2/Tr + c3 δ²/(c4 + Tr) + c5 δ⁶), density in kg/m³ */
-  | { readonly form: "symbolic"; readonly T: number; readonly density: number; readonly c: readonly [number, number, number, number, number, number] }
+  | {
+      readonly form: "symbolic";
+      readonly T: number;
+      readonly density: number;
+      readonly c: readonly [number, number, number, number, number, number];
+    }
   /** ηt (c1 Tr δ³ + (δ² + δ^γ)/(Tr − c2)), ηt = ρt^(2/3) √(R Tt)/(M^(1/6) N_A^(1/3)), Laesecke & Muzny 2017; density in kg/m³ */
-  | { readonly form: "triple point"; readonly T: number; readonly density: number; readonly c1: number; readonly c2: number; readonly gamma: number };
+  | {
+      readonly form: "triple point";
+      readonly T: number;
+      readonly density: number;
+      readonly c1: number;
+      readonly c2: number;
+      readonly gamma: number;
+    };
 
 type Rows3 = readonly (readonly [g: number, r: number, s: number])[];
 

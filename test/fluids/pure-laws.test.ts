@@ -313,7 +313,13 @@ describe("the shelf's lines", () => {
 
   test("air's published uncertainties stand at its line", () => {
     const air = sure(findFluid("air"));
-    expect(air.uncertainty(300, 1e5)).toMatchObject({ density: 0.001, cp: 0.01, viscosity: 0.05, conductivity: 0.05, origin: "from memory" });
+    expect(air.uncertainty(300, 1e5)).toMatchObject({
+      density: 0.001,
+      cp: 0.01,
+      viscosity: 0.05,
+      conductivity: 0.05,
+      origin: "from memory",
+    });
     expect(air.range.T).toEqual([60, 2000]);
     expect(air.range.p[1]).toBe(1e8);
   });

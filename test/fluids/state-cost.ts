@@ -41,7 +41,13 @@ function sweepOf(record: PureRecord, states: number, now: () => number): () => n
   return () => sweep(fluid, temperatures, [Math.min(3e5, 0.1 * pc), 1.5 * pc], states, now);
 }
 
-function sweep(fluid: Fluid, [low, high]: readonly [number, number], pressures: readonly [number, number], states: number, now: () => number): number {
+function sweep(
+  fluid: Fluid,
+  [low, high]: readonly [number, number],
+  pressures: readonly [number, number],
+  states: number,
+  now: () => number,
+): number {
   let sum = 0;
   const begun = now();
   for (let i = 0; i < states; i++) {
