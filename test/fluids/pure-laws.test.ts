@@ -4,6 +4,7 @@ import { pureFluid } from "../../src/fluids/pure-fluid.js";
 import { pureModel } from "../../src/fluids/pure-model.js";
 import type { PureRecord } from "../../src/fluids/pure-record.js";
 import { pureFluids, pureRecord, pureRecords } from "../../src/fluids/records/pure/index.js";
+import { figures } from "../../src/fluids/refusal.js";
 import { findFluid } from "../../src/fluids/shelf.js";
 import { isProblem, type Problem } from "../../src/quantities/problems.js";
 import { bibliography } from "../../src/bibliography.js";
@@ -103,8 +104,8 @@ describe("the saturation line", () => {
     const { p, liquid, vapour } = saturationAt(fluid, T);
     const sentence = sentenceOf(fluid.state(T, p));
     expect(sentence).toMatch(/on its saturation line/);
-    expect(sentence).toContain(liquid.density.toPrecision(5));
-    expect(sentence).toContain(vapour.density.toPrecision(5));
+    expect(sentence).toContain(figures(liquid.density));
+    expect(sentence).toContain(figures(vapour.density));
     expect(sure(fluid.state(T, 1.001 * p)).phase).toBe("liquid");
     expect(sure(fluid.state(T, 0.999 * p)).phase).toBe("gas");
   });
