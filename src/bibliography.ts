@@ -648,7 +648,7 @@ export const bibliography = {
     cite: "A. Mulero; I. Cachadiña; M. I. Parra, Recommended Correlations for the Surface Tension of Common Fluids, J. Phys. Chem. Ref. Data, vol. 41, 2012, p. 043105-1:13, doi:10.1063/1.4768782",
   },
   "mulero-2014-jpcrd": {
-    cite: "A. Mulero; I. Cachadiña, Recommended Correlations for the Surface Tension of Several Fluids Included in the REFPROP Program, J. Phys. Chem. Ref. Data, vol. 43, 2014, p. 023104-1:8, doi:10.1063/1.4878755",
+    cite: "A. Mulero; I. Cachadiña, Recommended Correlations for the Surface Tension of Several Fluids, J. Phys. Chem. Ref. Data, vol. 43, 2014, p. 023104-1:8, doi:10.1063/1.4878755",
   },
   "muzny-2013-jced": {
     cite: "C. D. Muzny, M. L. Huber, A. F. Kazakov, Correlation for the viscosity of normal hydrogen obtained from symbolic regression, J. Chem. Eng. Data 58 (2013) 969-979",
