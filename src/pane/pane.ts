@@ -1,0 +1,88 @@
+/** The frame of the pane: pages, the way between them, the theme. The host is only known by its few verbs. */
+import type { HostFacts, SheetHost } from "./host.js";
+import { el } from "./node.js";
+import type { Errand, Frame, Page, PageId } from "./page.js";
+import { render, show } from "./render.js";
+import { thisCellPage } from "./this-cell/page.js";
+import { words } from "./words.js";
+
+export const allPages: readonly Page[] = [thisCellPage];
+
+/** Opens the pane inside an element; the answer closes it. */
+export function openPane(root: HTMLElement, host: SheetHost, pages: readonly Page[] = allPages): () => void {
+  const pane = new Pane(root, host, pages);
+  return () => pane.close();
+}
+
+class Pane {
+  private readonly content: HTMLElement;
+  private readonly says: HTMLElement;
+  private endPage: () => void = () => undefined;
+  private readonly stopTheme: () => void;
+
+  constructor(
+    private readonly root: HTMLElement,
+    private readonly host: SheetHost,
+    private readonly pages: readonly Page[],
+  ) {
+    root.classList.add("pane");
+    this.content = render(el("main", { class: "page", id: "page" })) as HTMLElement;
+    this.says = render(el("p", { class: "says", role: "status" })) as HTMLElement;
+    root.replaceChildren(render(this.head()), this.content, this.says);
+    void this.followTheme();
+    this.stopTheme = host.onThemeChanged?.(() => void this.followTheme()) ?? ((): void => undefined);
+    this.open(pages[0]?.id ?? "this-cell", {});
+  }
+
+  close(): void {
+    this.endPage();
+    this.stopTheme();
+    this.root.replaceChildren();
+  }
+
+  private head(): ReturnType<typeof el> {
+    return el(
+      "header",
+      { class: "head" },
+      el("h1", { class: this.pages.length > 1 ? "unseen" : "" }, words.title),
+      this.pages.length > 1 &&
+        el(
+          "nav",
+          { "aria-label": words.pages.navigation },
+          el("ul", { class: "tabs" }, ...this.pages.map((page) => el("li", {}, el("button", { type: "button", class: "tab", id: `tab-${page.id}`, click: () => this.open(page.id, {}) }, page.title)))),
+        ),
+    );
+  }
+
+  private open(id: PageId, errand: Errand): void {
+    const page = this.pages.find((one) => one.id === id);
+    if (page === undefined) return;
+    this.endPage();
+    for (const tab of this.root.querySelectorAll(".tab")) {
+      if (tab.id === `tab-${id}`) tab.setAttribute("aria-current", "page");
+      else tab.removeAttribute("aria-current");
+    }
+    this.says.textContent = "";
+    this.content.replaceChildren();
+    this.content.scrollTop = 0;
+    this.endPage = page.begin(this.frame(), errand);
+  }
+
+  private frame(): Frame {
+    return {
+      host: this.host,
+      content: this.content,
+      show: (children) => show(this.content, children),
+      open: (page, errand = {}) => this.open(page, errand),
+      has: (page) => this.pages.some((one) => one.id === page),
+      say: (sentence) => {
+        this.says.textContent = sentence;
+      },
+    };
+  }
+
+  private async followTheme(): Promise<void> {
+    const facts: HostFacts | undefined = await this.host.facts().catch(() => undefined);
+    this.root.ownerDocument.documentElement.dataset.theme = facts?.theme ?? "system";
+  }
+}
