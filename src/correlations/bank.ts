@@ -301,7 +301,11 @@ export const gnielinski1978BankAligned: Correlation = {
   source: { work: "gnielinski-1978", at: "also VDI Heat Atlas, sect. G7" },
   confidence: "M",
   note: "From memory. Rel and NuP are on the flow length pi*D/2, Nu on the diameter. Liquids times (Pr/Prw)^0.25 (heating) or 0.11 (cooling); gases (Tb/Tw)^0.12. Single-row part and row count are confirmed by an independent open implementation, the arrangement factor is not.",
-  symbols: { Rel: "Reynolds number on the approach speed and the flow length pi*D/2", a: "transverse pitch / diameter", b: "longitudinal pitch / diameter" },
+  symbols: {
+    Rel: "Reynolds number on the approach speed and the flow length pi*D/2",
+    a: "transverse pitch / diameter",
+    b: "longitudinal pitch / diameter",
+  },
 };
 
 export const gnielinski1978BankStaggered: Correlation = {
@@ -330,7 +334,11 @@ export const gnielinski1978BankStaggered: Correlation = {
   source: { work: "gnielinski-1978", at: "also VDI Heat Atlas, sect. G7" },
   confidence: "M",
   note: "From memory. Rel and NuP are on the flow length pi*D/2, Nu on the diameter. Single-row part and row count are confirmed by an independent open implementation, the arrangement factor is not.",
-  symbols: { Rel: "Reynolds number on the approach speed and the flow length pi*D/2", a: "transverse pitch / diameter", b: "longitudinal pitch / diameter" },
+  symbols: {
+    Rel: "Reynolds number on the approach speed and the flow length pi*D/2",
+    a: "transverse pitch / diameter",
+    b: "longitudinal pitch / diameter",
+  },
 };
 
 export const gaddisGnielinski1985DpAligned: Correlation = {

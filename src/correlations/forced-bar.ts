@@ -53,7 +53,7 @@ export const sparrow2004HexagonFlatLow: Correlation = {
   scatter: { value: 0.25, origin: "common practice" },
   source: { work: "sparrow-2004", at: "as tabled in Incropera et al., Fundamentals of Heat and Mass Transfer, 7th ed." },
   confidence: "M",
-  note: "From memory. Attitude and constants as two independent open readings of the textbook table give them; the drawing itself was not seen, and one older textbook gives the two-range law to the turned hexagon: mark.",
+  note: "From memory. Attitude and constants as two independent open readings of the textbook table give them; the drawing itself was not seen, and one older textbook gives the two-range law to the turned hexagon.",
 };
 
 export const sparrow2004HexagonFlatHigh: Correlation = {

@@ -321,7 +321,7 @@ export const sanitjaiGoldstein2004Cylinder: Correlation = {
   scatter: { value: 0.15, origin: "common practice" },
   source: { work: "sanitjai-goldstein-2004" },
   confidence: "N",
-  note: "Cells: the exponential overflows only far beyond the range.",
+  note: "The exponential overflows only far beyond the range.",
 };
 
 export const kramers1946Cylinder: Correlation = {

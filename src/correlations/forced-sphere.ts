@@ -73,7 +73,7 @@ export const ranzMarshall1952Sphere: Correlation = {
   scatter: { value: 0.15, origin: "common practice" },
   source: { work: "ranz-marshall-1952" },
   confidence: "N",
-  note: "Measured on drops to Re 200; books apply it to 5e4 (flag).",
+  note: "Measured on drops to Re 200; books apply it to 5e4.",
 };
 
 export const clift1978SphereLow: Correlation = {

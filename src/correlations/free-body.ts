@@ -46,7 +46,9 @@ export const yovanovich1987Body: Correlation = {
   source: { work: "yovanovich-1987" },
   confidence: "M",
   note: "Nu0 of the sphere is exact (2*sqrt(pi)); the other constants are from memory.",
-  symbols: { body: "sphere, cube on a face, cube on an edge, cube on a corner, vertical cylinder (height = diameter), horizontal cylinder (length = diameter)" },
+  symbols: {
+    body: "sphere, cube on a face, cube on an edge, cube on a corner, vertical cylinder (height = diameter), horizontal cylinder (length = diameter)",
+  },
 };
 
 export const king1932Block: Correlation = {

@@ -80,7 +80,7 @@ export const morgan1975FreeCylinder: Correlation = {
   scatter: { value: 0.15, origin: "common practice" },
   source: { work: "morgan-1975" },
   confidence: "N",
-  note: "Read from printed books alike; air chiefly, Pr limit is customary. Steps at the seams up to 4 %. At Ra 1e5 it lies 17 % above Churchill & Chu laminar and 10 % above their all-Ra line: the measured scatter. Table agrees with an independent open implementation.",
+  note: "Read from printed books alike; air chiefly, Pr limit is customary. Steps at the seams of about 1 %. At Ra 1e5 it lies 17 % above Churchill & Chu laminar and 10 % above their all-Ra line: the measured scatter. Table agrees with an independent open implementation.",
 };
 
 export const kuehnGoldstein1976Cylinder: Correlation = {

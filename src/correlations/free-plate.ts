@@ -78,7 +78,7 @@ export const lefevre1956PlateLaminar: Correlation = {
   scatter: { value: 0.05, origin: "common practice" },
   source: { work: "le-fevre-1956" },
   confidence: "N",
-  note: "Fits the exact laminar solution within 0.5 % over all Pr; the closest laminar form of this file.",
+  note: "Fits the exact laminar solution within 0.5 % over all Pr; the closest of the laminar forms.",
 };
 
 export const ede1967PlateLaminar: Correlation = {

@@ -98,7 +98,7 @@ export const metaisEckert1964LevelTurbulent: Correlation = {
   scatter: { value: 0.4, origin: "from memory" },
   source: { work: "metais-eckert-1964" },
   confidence: "M",
-  note: "From memory. Belongs to the mixed turbulent field of the regime map (10^-2 < Pr*D/L < 1); the ranges of Gr and D/L are placeholders.",
+  note: "From memory. Belongs to the mixed turbulent field of the regime map (10^-2 < Pr*D/L < 1); the ranges of Gr and D/L are assumed.",
 };
 
 export const jacksonHall1979UprightLimit: Correlation = {

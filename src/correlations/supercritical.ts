@@ -20,8 +20,13 @@ export const jackson2002Supercritical: Correlation = {
   scatter: { value: 0.25, origin: "common practice" },
   source: { work: "jackson-2013" },
   confidence: "N",
-  note: "Constants confirmed, range from memory. Normal heat transfer only, forced flow with negligible buoyancy; absolute temperatures. Deterioration is not predicted: always to be marked.",
-  symbols: { Tw: "wall temperature, K", Tpc: "temperature where cp peaks at this pressure, K", rhow_rhob: "density at the wall / in the bulk", cpm_cpb: "enthalpy difference over temperature difference, wall to bulk, over cp in the bulk" },
+  note: "Constants confirmed, range from memory. Normal heat transfer only, forced flow with negligible buoyancy; absolute temperatures. Deterioration of heat transfer is not predicted.",
+  symbols: {
+    Tw: "wall temperature, K",
+    Tpc: "temperature where cp peaks at this pressure, K",
+    rhow_rhob: "density at the wall / in the bulk",
+    cpm_cpb: "enthalpy difference over temperature difference, wall to bulk, over cp in the bulk",
+  },
 };
 
 export const mokry2011SupercriticalWater: Correlation = {
@@ -40,6 +45,6 @@ export const mokry2011SupercriticalWater: Correlation = {
   scatter: { value: 0.25, origin: "published" },
   source: { work: "mokry-pioro-2011" },
   confidence: "N",
-  note: "Constants confirmed, range from memory. 24 MPa, 200-1500 kg/(m2 s), flux to 1250 kW/m2, bare vertical tube 10 mm. Always to be marked.",
+  note: "Constants confirmed, range from memory. 24 MPa, 200-1500 kg/(m2 s), flux to 1250 kW/m2, bare vertical tube 10 mm.",
   symbols: { Prm: "Prandtl number with the mean cp between wall and bulk", rhow_rhob: "density at the wall / in the bulk" },
 };

@@ -4,7 +4,7 @@
  */
 import type { Correlation } from "./correlation.js";
 import { gnielinskiTubeHLocal, gnielinskiTubeTLocal, gnielinskiTubeTMeanThermal, levequeTubeHMean } from "./tube-laminar.js";
-import { gnielinski2013Tube } from "./tube-turbulent.js";
+import { gnielinski2013Tube, gnielinski2013TubeLocal } from "./tube-turbulent.js";
 
 type Wall = "isothermal" | "uniform flux";
 type Extent = "mean" | "local";
@@ -12,12 +12,6 @@ type Extent = "mean" | "local";
 /** The laminar part without its own x/(D*Re*Pr), which is infinite where the flow is developed. */
 function laminarPart(record: Correlation): Correlation {
   return { ...record, lines: { ...record.lines, Gz: "ReL*Pr*D_L" } };
-}
-
-/** The turbulent law of its source; the local length factor is the derivative of length times mean. */
-function turbulentPart(extent: Extent): Correlation {
-  if (extent === "mean") return gnielinski2013Tube;
-  return { ...gnielinski2013Tube, lines: { ...gnielinski2013Tube.lines, Nu: (gnielinski2013Tube.lines["Nu"] ?? "").replace("(1+D_L^(2/3))", "(1+D_L^(2/3)/3)") } };
 }
 
 function tubeDefault(id: string, laminar: Correlation, wall: Wall, extent: Extent): Correlation {
@@ -32,7 +26,7 @@ function tubeDefault(id: string, laminar: Correlation, wall: Wall, extent: Exten
     length: "diameter",
     parts: {
       lam: { of: laminarPart(laminar) },
-      turb: { of: turbulentPart(extent), with: { Re: "MAX(Re,4000)" } },
+      turb: { of: extent === "mean" ? gnielinski2013Tube : gnielinski2013TubeLocal, with: { Re: "MAX(Re,4000)" } },
     },
     lines: {
       ReL: "MIN(Re,2300)",

@@ -161,6 +161,27 @@ export const gnielinski2013Tube: Correlation = {
   note: "Property factor apart. VDI Heat Atlas: (f/8)*Re instead of (Re-1000) above 1e4, within 1 % at 1e5.",
 };
 
+export const gnielinski2013TubeLocal: Correlation = {
+  id: "gnielinski-2013-tube-local",
+  name: "Gnielinski 2013, turbulent, with distance from the inlet, local",
+  serves: ["DUCT.TUBE"],
+  result: "Nu",
+  extent: "local",
+  wall: "either",
+  propertiesAt: "bulk",
+  length: "diameter",
+  lines: {
+    f: "(1.8*LOG10(Re)-1.5)^(-2)",
+    Nu: "(f/8)*(Re-1000)*Pr/(1+12.7*SQRT(f/8)*(Pr^(2/3)-1))*(1+D_L^(2/3)/3)",
+  },
+  ranges: { Re: [4000, 1e6], Pr: [0.1, 1000], D_L: [0, 1] },
+  rangeOrigin: "published",
+  scatter: { value: 0.1, origin: "published" },
+  source: { work: "gnielinski-2013", at: "also VDI Heat Atlas, sect. G1" },
+  confidence: "N",
+  note: "D_L is diameter / distance from the inlet. The length factor is that of the mean law, differentiated: d(L*Nu)/dL. Property factor apart.",
+};
+
 export const gnielinski2013TransitionT: Correlation = {
   id: "gnielinski-2013-transition-T",
   name: "Gnielinski 2013, transition 2300 to 4000 by interpolation, uniform temperature",

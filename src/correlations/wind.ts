@@ -41,7 +41,10 @@ export const iso6946Internal: Correlation = {
   source: { work: "iso-6946", at: "annex C" },
   confidence: "M",
   note: "From memory. Conventional Rsi: 0.10, 0.13, 0.17. Holds radiation.",
-  symbols: { hc: "convective coefficient by direction of heat flow: up 5.0, level 2.5, down 0.7 W/(m2 K)", hr: "radiative coefficient, W/(m2 K)" },
+  symbols: {
+    hc: "convective coefficient by direction of heat flow: up 5.0, level 2.5, down 0.7 W/(m2 K)",
+    hr: "radiative coefficient, W/(m2 K)",
+  },
 };
 
 export const iso12241VerticalFree: Correlation = {
@@ -227,7 +230,13 @@ export const astmC6801989: Correlation = {
   source: { work: "astm-c680-1989", at: "after Langmuir 1915 and Heilman 1929" },
   confidence: "M",
   note: "From memory. Convection only. Later editions replaced it by general correlations.",
-  symbols: { attitude: "horizontal cylinder, long vertical cylinder, vertical plate, warm side up, warm side down", d_in: "outside diameter, inch; plates 24", TavgR: "mean absolute temperature, degrees Rankine", dTF: "temperature difference, degrees Fahrenheit", mph: "wind speed, mile/h" },
+  symbols: {
+    attitude: "horizontal cylinder, long vertical cylinder, vertical plate, warm side up, warm side down",
+    d_in: "outside diameter, inch; plates 24",
+    TavgR: "mean absolute temperature, degrees Rankine",
+    dTF: "temperature difference, degrees Fahrenheit",
+    mph: "wind speed, mile/h",
+  },
 };
 
 export const juerges1924: Correlation = {

@@ -7,7 +7,10 @@ import { textCode } from "./text-code.js";
 /** Reads its operands from their slots and gives the value; truth is 1 and 0. */
 export type Step = (values: Float64Array) => number;
 
-type Piece = { readonly kind: "constant"; readonly value: number } | { readonly kind: "slot"; readonly slot: number } | { readonly kind: "step"; readonly step: Step };
+type Piece =
+  | { readonly kind: "constant"; readonly value: number }
+  | { readonly kind: "slot"; readonly slot: number }
+  | { readonly kind: "step"; readonly step: Step };
 
 /** Compiles a tree; `slot` gives the place of each symbol. */
 export function compileNode(node: Node, slot: (name: string) => number): Step {

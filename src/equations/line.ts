@@ -101,7 +101,8 @@ const pattern =
   /(?<space>\s+)|(?<text>"(?:[^"]|"")*")|(?<number>(?:\d+\.?\d*|\.\d+)(?:[eE][+-]?\d+)?)|(?<word>[A-Za-z_][A-Za-z0-9_]*)|(?<sign><=|>=|<>|[-+*/^(),<>=])/y;
 
 function tokensOf(text: string): readonly Token[] {
-  if (text.length > longestLine) throw new LineError(`The line has ${text.length} characters; at most ${longestLine} can be read.`, longestLine);
+  if (text.length > longestLine)
+    throw new LineError(`The line has ${text.length} characters; at most ${longestLine} can be read.`, longestLine);
   const tokens: Token[] = [];
   let from = 0;
   while (from < text.length) {
@@ -187,7 +188,10 @@ class Reader {
   private comparison(): Node {
     this.depth += 1;
     if (this.depth > deepestNesting) {
-      throw new LineError(`Brackets are nested more than ${deepestNesting} deep at character ${this.peek().at}; split the line.`, this.peek().at);
+      throw new LineError(
+        `Brackets are nested more than ${deepestNesting} deep at character ${this.peek().at}; split the line.`,
+        this.peek().at,
+      );
     }
     let left = this.sum();
     while (this.peek().kind === "sign" && comparisons.has(this.peek().text)) {
@@ -276,7 +280,10 @@ class Reader {
     const name = word.text.toUpperCase();
     if (!isFunctionName(name)) {
       const known = Object.keys(functions).join(", ");
-      throw new LineError(`${word.text} at character ${word.at} is no function of the algebra; known are ${known}. Write * for a product.`, word.at);
+      throw new LineError(
+        `${word.text} at character ${word.at} is no function of the algebra; known are ${known}. Write * for a product.`,
+        word.at,
+      );
     }
     const args = this.args(word);
     const [least, most] = functions[name];

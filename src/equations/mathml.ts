@@ -127,7 +127,8 @@ class Typesetter {
   }
 
   private powerBase(base: Node): string {
-    const bare = base.kind === "name" || (base.kind === "number" && !isScientific(base.value)) || (base.kind === "call" && base.name === "ABS");
+    const bare =
+      base.kind === "name" || (base.kind === "number" && !isScientific(base.value)) || (base.kind === "call" && base.name === "ABS");
     return bare ? this.whole(base) : brackets(this.whole(base));
   }
 
@@ -166,7 +167,10 @@ class Typesetter {
       case "OR":
         return `<mrow>${node.args.map((one) => this.whole(one)).join(`<mtext> ${node.name.toLowerCase()} </mtext>`)}</mrow>`;
       default:
-        return applied(upright(functionWords[node.name] ?? node.name.toLowerCase()), node.args.map((one) => this.whole(one)).join("<mo>,</mo>"));
+        return applied(
+          upright(functionWords[node.name] ?? node.name.toLowerCase()),
+          node.args.map((one) => this.whole(one)).join("<mo>,</mo>"),
+        );
     }
   }
 

@@ -30,17 +30,14 @@ export function childrenOf(node: Node): readonly Node[] {
 
 /** Every symbol that `map` knows gets its new name; the others keep theirs. */
 export function renameSymbols(node: Node, map: Readonly<Record<string, string>>): Node {
-  return replaceNames(node, (name) => (has(map, name) ? { kind: "name", name: map[name] as string } : undefined));
+  return substitute(node, Object.fromEntries(Object.entries(map).map(([from, name]) => [from, { kind: "name", name }])));
 }
 
 /** Every symbol that `by` knows is replaced by its tree. */
 export function substitute(node: Node, by: Readonly<Record<string, Node>>): Node {
-  return replaceNames(node, (name) => (has(by, name) ? by[name] : undefined));
-}
-
-/** A symbol may be called "constructor": only the map's own entries count. */
-function has(map: object, name: string): boolean {
-  return Object.prototype.hasOwnProperty.call(map, name);
+  // A map, since a symbol may be called "constructor".
+  const trees = new Map(Object.entries(by));
+  return replaceNames(node, (name) => trees.get(name));
 }
 
 function replaceNames(node: Node, replacement: (name: string) => Node | undefined): Node {
@@ -89,7 +86,8 @@ export function print(node: Node, wording: Wording): string {
 
 function printBinary(node: Node & { kind: "binary" }, wording: Wording): string {
   const own = tightness(node.operator);
-  const left = node.left.kind === "binary" ? needsBracket(node.left.operator, node.operator) : node.left.kind === "minus" && own === tightness("^");
+  const left =
+    node.left.kind === "binary" ? needsBracket(node.left.operator, node.operator) : node.left.kind === "minus" && own === tightness("^");
   const right = node.right.kind === "minus" || (node.right.kind === "binary" && tightness(node.right.operator) <= own);
   return `${bracketed(node.left, left, wording)}${node.operator}${bracketed(node.right, right, wording)}`;
 }

@@ -40,7 +40,8 @@ function checked(name: string, rows: readonly (readonly [number, number])[]): re
 function keys(of: string, rows: readonly (readonly [string, number])[]): Node {
   const unknown: Node = binaryNode("/", numberNode(0), numberNode(0));
   return rows.reduceRight<Node>(
-    (otherwise, [word, value]) => callNode("IF", binaryNode("=", nameNode(of), { kind: "text", value: word }), numberNode(value), otherwise),
+    (otherwise, [word, value]) =>
+      callNode("IF", binaryNode("=", nameNode(of), { kind: "text", value: word }), numberNode(value), otherwise),
     unknown,
   );
 }
@@ -96,7 +97,12 @@ function choose(of: string, limits: readonly number[], choices: readonly Node[])
   if (limits.length === 0) return choices[0] as Node;
   const at = limits.length > longestChain ? Math.floor(limits.length / 2) : 0;
   const test = binaryNode("<=", nameNode(of), numberNode(limits[at] as number));
-  return callNode("IF", test, choose(of, limits.slice(0, at), choices.slice(0, at + 1)), choose(of, limits.slice(at + 1), choices.slice(at + 1)));
+  return callNode(
+    "IF",
+    test,
+    choose(of, limits.slice(0, at), choices.slice(0, at + 1)),
+    choose(of, limits.slice(at + 1), choices.slice(at + 1)),
+  );
 }
 
 /** A longer chain reads badly and nests too deep. */

@@ -6,7 +6,9 @@ const folder = new URL("../../src/", import.meta.url);
 
 /** Every source file but the bibliography itself. */
 function sources(): string {
-  const files = readdirSync(folder, { recursive: true, encoding: "utf8" }).filter((name) => /\.(ts|tsx|json)$/.test(name) && name !== "bibliography.ts");
+  const files = readdirSync(folder, { recursive: true, encoding: "utf8" }).filter(
+    (name) => /\.(ts|tsx|json)$/.test(name) && name !== "bibliography.ts",
+  );
   return files.map((name) => readFileSync(new URL(name, folder), "utf8")).join("\n");
 }
 

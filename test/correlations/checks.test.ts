@@ -27,7 +27,9 @@ describe.each(["published", "independent", "comparison", "pinned"] as const)("%s
   });
 });
 
-const outside: ReadonlySet<string> = new Set(checks.filter((check) => check.kind === "published" || check.kind === "independent").map((check) => check.id));
+const outside: ReadonlySet<string> = new Set(
+  checks.filter((check) => check.kind === "published" || check.kind === "independent").map((check) => check.id),
+);
 
 /** Records whose constants were confirmed, though not by a number that stands here: how, by id. */
 const confirmedElsewhere = readData<Readonly<Record<string, string>>>("confirmed-elsewhere.json");
@@ -43,6 +45,10 @@ afterAll(() => {
   const kinds = ["published", "independent", "comparison", "pinned"] as const;
   const counts = kinds.map((kind) => `${kind} ${checks.filter((check) => check.kind === kind).length}`);
   const held = new Set(checks.filter((check) => check.kind !== "pinned").map((check) => check.id));
-  const unverified = allCorrelations.filter((record) => !held.has(record.id) && !(record.id in confirmedElsewhere)).map((record) => record.id);
-  console.info(`Checks of correlations: ${counts.join(", ")}.\nHeld by pinned numbers only, so unverified (${unverified.length}): ${unverified.join(", ")}`);
+  const unverified = allCorrelations
+    .filter((record) => !held.has(record.id) && !(record.id in confirmedElsewhere))
+    .map((record) => record.id);
+  console.info(
+    `Checks of correlations: ${counts.join(", ")}.\nHeld by pinned numbers only, so unverified (${unverified.length}): ${unverified.join(", ")}`,
+  );
 });

@@ -53,10 +53,15 @@ describe("tilted plate of Raithby & Hollands", () => {
   test("level it is the horizontal face of a wide plate, whose A/P is half its length", () => {
     const level = { Ra: 1e8 / 8, Pr: 0.71 };
     expect(value("raithby-hollands-1998-tilted-up", { ...inputs, tilt: 90 })).toBeCloseTo(2 * value("raithby-hollands-1998-top", level), 6);
-    expect(value("raithby-hollands-1998-tilted-down", { ...inputs, tilt: 90 })).toBeCloseTo(2 * value("raithby-hollands-1998-under", level), 6);
+    expect(value("raithby-hollands-1998-tilted-down", { ...inputs, tilt: 90 })).toBeCloseTo(
+      2 * value("raithby-hollands-1998-under", level),
+      6,
+    );
   });
   test("the sign of the tilt is the surface's business", () => {
-    expect(value("raithby-hollands-1998-tilted-up", { ...inputs, tilt: -40 })).toBe(value("raithby-hollands-1998-tilted-up", { ...inputs, tilt: 40 }));
+    expect(value("raithby-hollands-1998-tilted-up", { ...inputs, tilt: -40 })).toBe(
+      value("raithby-hollands-1998-tilted-up", { ...inputs, tilt: 40 }),
+    );
   });
 });
 
@@ -71,7 +76,9 @@ test("the flux blend meets the isothermal one at the same Ra where h no longer d
 test("laws on another length give what the same law on the diameter gives", () => {
   // 0.60*(pi/2)^0.5 = 0.752: Churchill & Chu's cylinder and the handbook's form on pi*D/2 are one law.
   for (const Ra of [1e3, 1e6, 1e9]) {
-    expect(Math.abs(value("hedh-1983-cylinder", { Ra, Pr: 0.71 }) / value("churchill-chu-1975-cylinder-all", { Ra, Pr: 0.71 }) - 1)).toBeLessThan(1e-3);
+    expect(
+      Math.abs(value("hedh-1983-cylinder", { Ra, Pr: 0.71 }) / value("churchill-chu-1975-cylinder-all", { Ra, Pr: 0.71 }) - 1),
+    ).toBeLessThan(1e-3);
   }
   // McAdams on the side of a square, four times its A/P: h by hand
   const [side, Ra] = [1, 1e5];

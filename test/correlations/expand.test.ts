@@ -2,15 +2,22 @@ import { describe, expect, test } from "vitest";
 import type { Correlation } from "../../src/correlations/correlation.js";
 import { linesOf } from "../../src/correlations/expand.js";
 import { correlationById } from "../../src/correlations/index.js";
-import { productOf } from "../../src/correlations/product.js";
 import { meaningOf, symbolMath } from "../../src/correlations/symbols.js";
 import { printLine } from "../../src/equations/rewrite.js";
-import { compiled } from "./evaluation.js";
 
 const inner: Correlation = {
   ...correlationById("mcadams-1954-plate-laminar"),
   id: "inner",
-  tables: { C: { of: "Pr", how: "step", rows: [[1, 0.5], [10, 0.6]] } },
+  tables: {
+    C: {
+      of: "Pr",
+      how: "step",
+      rows: [
+        [1, 0.5],
+        [10, 0.6],
+      ],
+    },
+  },
   lines: { Rat: "C*Ra", Nu: "Rat^0.25+Pr" },
 };
 const outer: Correlation = {
@@ -48,27 +55,15 @@ describe("a record with parts", () => {
   });
 
   test("a part may replace a symbol by a line of the outer record that itself needs a part", () => {
-    const fed: Correlation = { ...outer, id: "fed", parts: { F: { of: inner }, V: { of: inner, with: { Ra: "first*10" } } }, lines: { first: "Nu_F^2", Nu: "Nu_V" } };
+    const fed: Correlation = {
+      ...outer,
+      id: "fed",
+      parts: { F: { of: inner }, V: { of: inner, with: { Ra: "first*10" } } },
+      lines: { first: "Nu_F^2", Nu: "Nu_V" },
+    };
     const lines = text(fed);
     expect(lines.indexOf("first = Nu_F^2")).toBeGreaterThan(lines.findIndex((line) => line.startsWith("Nu_F =")));
     expect(lines.indexOf("Ra_V = first*10")).toBeGreaterThan(lines.indexOf("first = Nu_F^2"));
-  });
-});
-
-describe("a law times a factor", () => {
-  const law = correlationById("tube-default-T-mean");
-  const factor = correlationById("property-liquid-pr");
-  const product = productOf(law, factor);
-  const inputs = { Re: 2e4, Pr: 5, D_L: 0.01, Pr_Prw: 1.7 };
-
-  test("is the product of both", () => {
-    expect(compiled(product).at(inputs)).toBeCloseTo(compiled(law).at(inputs) * 1.7 ** 0.11, 9);
-  });
-
-  test("ranges follow the lines to their new names", () => {
-    expect(Object.keys(product.ranges).sort()).toEqual(["D_L", "PrT_law", "Pr_Prw", "Re"]);
-    const names = [...compiled(product).program.inputs, ...compiled(product).program.names];
-    for (const symbol of Object.keys(product.ranges)) expect(names).toContain(symbol);
   });
 });
 

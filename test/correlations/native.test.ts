@@ -38,7 +38,9 @@ describe.runIf(canRecalculate())("LibreOffice Calc recalculates every line of ev
         const ours = one.at(point, name);
         const cell = answers[start + one.program.inputs.length + i]?.[1] ?? "";
         expect(cell, `${name} at ${JSON.stringify(point)}`).not.toBe("");
-        expect(Math.abs(Number(cell) - ours), `${name}: ${cell} against ${ours} at ${JSON.stringify(point)}`).toBeLessThanOrEqual(1e-11 * Math.abs(ours) + 1e-20); // the judge prints twenty decimals
+        expect(Math.abs(Number(cell) - ours), `${name}: ${cell} against ${ours} at ${JSON.stringify(point)}`).toBeLessThanOrEqual(
+          1e-11 * Math.abs(ours) + 1e-20,
+        ); // the judge prints twenty decimals
       });
     }
   });

@@ -1,6 +1,17 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
-import { binaryNode, callNode, type FunctionName, functions, LineError, type Node, nameNode, numberNode, type Operator, parseLine } from "../../src/equations/line.js";
+import {
+  binaryNode,
+  callNode,
+  type FunctionName,
+  functions,
+  LineError,
+  type Node,
+  nameNode,
+  numberNode,
+  type Operator,
+  parseLine,
+} from "../../src/equations/line.js";
 import { printLine, renameSymbols, substitute, symbolsOf } from "../../src/equations/rewrite.js";
 
 function problemOf(text: string, strict = false): LineError {
@@ -65,7 +76,9 @@ const { tree } = fc.letrec<{ tree: Node }>((tie) => ({
     fc.string().map((value): Node => ({ kind: "text", value })),
     tie("tree").map((of): Node => ({ kind: "minus", of })),
     fc.tuple(operators, tie("tree"), tie("tree")).map(([operator, left, right]) => binaryNode(operator, left, right)),
-    fc.tuple(calls, fc.array(tie("tree"), { minLength: 3, maxLength: 3 })).map(([name, args]) => callNode(name, ...args.slice(0, functions[name][1]))),
+    fc
+      .tuple(calls, fc.array(tie("tree"), { minLength: 3, maxLength: 3 }))
+      .map(([name, args]) => callNode(name, ...args.slice(0, functions[name][1]))),
   ),
 }));
 

@@ -4,7 +4,9 @@ import { escapeXml, plainSymbol, toMathML } from "../../src/equations/mathml.js"
 
 /** Typeset, with what only spaces or frames it taken off. */
 function typeset(text: string): string {
-  return toMathML("y", parseLine(text), plainSymbol).replace('<math display="block"><mrow><mi>y</mi><mo>=</mo>', "").replace("</mrow></math>", "");
+  return toMathML("y", parseLine(text), plainSymbol)
+    .replace('<math display="block"><mrow><mi>y</mi><mo>=</mo>', "")
+    .replace("</mrow></math>", "");
 }
 
 describe("MathML of a line", () => {
@@ -20,7 +22,7 @@ describe("MathML of a line", () => {
   test("other exponents keep their form", () => {
     expect(typeset("a^(1/4)")).toBe("<msup><mi>a</mi><mrow><mn>1</mn><mo>/</mo><mn>4</mn></mrow></msup>");
     expect(typeset("a^0.8")).toBe("<msup><mi>a</mi><mn>0.8</mn></msup>");
-    expect(typeset("LN(a)^2")).toContain("<mo>(</mo><mrow><mi mathvariant=\"normal\">ln</mi>");
+    expect(typeset("LN(a)^2")).toContain('<mo>(</mo><mrow><mi mathvariant="normal">ln</mi>');
   });
   test("large and small numbers are powers of ten", () => {
     expect(typeset("1.4e9")).toBe("<mrow><mn>1.4</mn><mo>⋅</mo><msup><mn>10</mn><mn>9</mn></msup></mrow>");
@@ -46,7 +48,13 @@ describe("MathML of a line", () => {
     expect(typeset('IF(a="<b>",1,2)')).not.toContain("<b>");
   });
   test("every tag that opens closes", () => {
-    const text = toMathML("y", parseLine('IF(AND(a<1,NOT(b>=2)),-ABS(a)^2,INT(a)+ROUND(b,1)+LOG(a)+LOG(a,2)+LOG10(b)+SUM(a,b)*PI()+COS(RADIANS(a+b))+MIN(a,b,ERF(a)))'), plainSymbol);
+    const text = toMathML(
+      "y",
+      parseLine(
+        "IF(AND(a<1,NOT(b>=2)),-ABS(a)^2,INT(a)+ROUND(b,1)+LOG(a)+LOG(a,2)+LOG10(b)+SUM(a,b)*PI()+COS(RADIANS(a+b))+MIN(a,b,ERF(a)))",
+      ),
+      plainSymbol,
+    );
     const open: string[] = [];
     for (const [, slash, tag] of text.matchAll(/<(\/?)([a-z]+)[^>]*>/g)) {
       if (slash === "") open.push(tag as string);

@@ -4,7 +4,7 @@ import { LineError, numberNode, parseLine } from "../../src/equations/line.js";
 import { textCode } from "../../src/equations/text-code.js";
 
 /** One line's value with the given inputs. */
-function valueOf(text: string, inputs: Readonly<Record<string, number>> = {}): number {
+function lineValue(text: string, inputs: Readonly<Record<string, number>> = {}): number {
   const program = compileProgram([["value", text]]);
   const values = new Float64Array(program.size);
   for (const name of program.inputs) values[program.slot(name)] = inputs[name] ?? Number.NaN;
@@ -29,7 +29,7 @@ describe("precedence is that of a spreadsheet", () => {
     [".5+1.", 1.5],
     ["+3", 3],
   ])("%s is %d", (text, value) => {
-    expect(valueOf(text)).toBe(value);
+    expect(lineValue(text)).toBe(value);
   });
 });
 
@@ -74,20 +74,38 @@ describe("functions", () => {
     ["ERF(3)", 0.9999779095030014],
     ["ERF(-1)", -0.8427007929497149],
   ])("%s is %d", (text, value) => {
-    expect(Math.abs(valueOf(text) - value)).toBeLessThanOrEqual(2e-15 * Math.abs(value));
+    expect(Math.abs(lineValue(text) - value)).toBeLessThanOrEqual(2e-15 * Math.abs(value));
   });
 });
 
 describe("powers by their cheap ways agree with the general power", () => {
-  const exponents = ["0.5", "0.25", "0.75", "1.5", "(1/3)", "(2/3)", "(1/6)", "(9/16)", "2", "3", "4", "6", "-1", "-2", "1", "0.37", "(8/27)"];
+  const exponents = [
+    "0.5",
+    "0.25",
+    "0.75",
+    "1.5",
+    "(1/3)",
+    "(2/3)",
+    "(1/6)",
+    "(9/16)",
+    "2",
+    "3",
+    "4",
+    "6",
+    "-1",
+    "-2",
+    "1",
+    "0.37",
+    "(8/27)",
+  ];
   test.each(exponents)("x^%s", (exponent) => {
     for (const x of [1e-12, 1e-6, 0.3, 1, 7, 1e5, 3.3e12]) {
-      const general = valueOf("x^n", { x, n: valueOf(exponent) });
-      expect(Math.abs(valueOf(`x^${exponent}`, { x }) / general - 1)).toBeLessThanOrEqual(2e-15);
+      const general = lineValue("x^n", { x, n: lineValue(exponent) });
+      expect(Math.abs(lineValue(`x^${exponent}`, { x }) / general - 1)).toBeLessThanOrEqual(2e-15);
     }
   });
   test.each(["0.5", "0.25", "(1/3)", "(1/6)", "(2/3)", "(9/16)"])("(-8)^%s is no number", (exponent) => {
-    expect(valueOf(`x^${exponent}`, { x: -8 })).toBeNaN();
+    expect(lineValue(`x^${exponent}`, { x: -8 })).toBeNaN();
   });
 });
 
@@ -110,9 +128,11 @@ describe("every shape of operand gives the same number", () => {
     [">", (a, b) => Number(a > b)],
     [">=", (a, b) => Number(a >= b)],
   ];
-  const all = operators.flatMap(([sign, f]) => operands.flatMap(([a, u]) => operands.map(([b, w]) => [`${a}${sign}${b}`, f(u, w)] as const)));
+  const all = operators.flatMap(([sign, f]) =>
+    operands.flatMap(([a, u]) => operands.map(([b, w]) => [`${a}${sign}${b}`, f(u, w)] as const)),
+  );
   test.each(all)("%s", (text, value) => {
-    expect(valueOf(text, { x: 5, y: 7 })).toBeCloseTo(value, 9);
+    expect(lineValue(text, { x: 5, y: 7 })).toBeCloseTo(value, 9);
   });
 });
 
@@ -142,9 +162,19 @@ describe("programs", () => {
   });
 
   test("a line that uses a later one or itself, and a name given twice, are refused", () => {
-    expect(() => compileProgram([["a", "b+1"], ["b", "2"]])).toThrow(/line a uses b before b is worked out/);
+    expect(() =>
+      compileProgram([
+        ["a", "b+1"],
+        ["b", "2"],
+      ]),
+    ).toThrow(/line a uses b before b is worked out/);
     expect(() => compileProgram([["Re", "MIN(Re,2300)"]])).toThrow(LineError);
-    expect(() => compileProgram([["a", "1"], ["a", "2"]])).toThrow(/name a is given to two lines/);
+    expect(() =>
+      compileProgram([
+        ["a", "1"],
+        ["a", "2"],
+      ]),
+    ).toThrow(/name a is given to two lines/);
   });
 
   test("a word in a symbol is compared by its code, whatever its case", () => {
@@ -164,10 +194,44 @@ describe("programs", () => {
 
 describe("tables", () => {
   const tables = {
-    s: { of: "Re", how: "step", rows: [[40, 1], [4000, 2], [40000, 3]] },
-    l: { of: "Re", how: "linear", rows: [[1, 10], [2, 30], [4, -10], [5, -10]] },
-    k: { of: "shape", how: "key", rows: [["square", 3.61], ["circle", 4.36]] },
-    b: { of: ["x", "y"], how: "bilinear", x: [1, 2, 3], y: [10, 20], z: [[1, 2], [3, 5], [4, 4]] },
+    s: {
+      of: "Re",
+      how: "step",
+      rows: [
+        [40, 1],
+        [4000, 2],
+        [40000, 3],
+      ],
+    },
+    l: {
+      of: "Re",
+      how: "linear",
+      rows: [
+        [1, 10],
+        [2, 30],
+        [4, -10],
+        [5, -10],
+      ],
+    },
+    k: {
+      of: "shape",
+      how: "key",
+      rows: [
+        ["square", 3.61],
+        ["circle", 4.36],
+      ],
+    },
+    b: {
+      of: ["x", "y"],
+      how: "bilinear",
+      x: [1, 2, 3],
+      y: [10, 20],
+      z: [
+        [1, 2],
+        [3, 5],
+        [4, 4],
+      ],
+    },
   } as const;
   const run = (name: keyof typeof tables, inputs: Readonly<Record<string, number>>): number => {
     const program = compileProgram([["out", `${name}*1`]], { tables });
@@ -177,13 +241,30 @@ describe("tables", () => {
     return values[program.slot("out")] as number;
   };
 
-  test.each([[0, 1], [40, 1], [40.1, 2], [4000, 2], [4001, 3], [1e9, 3]])("step at %d", (Re, value) => expect(run("s", { Re })).toBe(value));
-  test.each([[0, 10], [1, 10], [1.5, 20], [2, 30], [3, 10], [4.5, -10], [9, -10]])("linear at %d", (Re, value) =>
-    expect(run("l", { Re })).toBeCloseTo(value, 12),
-  );
-  test.each([[0, 0, 1], [1.5, 15, 2.75], [2, 20, 5], [2.5, 10, 3.5], [9, 99, 4]])("bilinear at %d, %d", (x, y, value) =>
-    expect(run("b", { x, y })).toBeCloseTo(value, 12),
-  );
+  test.each([
+    [0, 1],
+    [40, 1],
+    [40.1, 2],
+    [4000, 2],
+    [4001, 3],
+    [1e9, 3],
+  ])("step at %d", (Re, value) => expect(run("s", { Re })).toBe(value));
+  test.each([
+    [0, 10],
+    [1, 10],
+    [1.5, 20],
+    [2, 30],
+    [3, 10],
+    [4.5, -10],
+    [9, -10],
+  ])("linear at %d", (Re, value) => expect(run("l", { Re })).toBeCloseTo(value, 12));
+  test.each([
+    [0, 0, 1],
+    [1.5, 15, 2.75],
+    [2, 20, 5],
+    [2.5, 10, 3.5],
+    [9, 99, 4],
+  ])("bilinear at %d, %d", (x, y, value) => expect(run("b", { x, y })).toBeCloseTo(value, 12));
   test("key by word; an unknown word is no number", () => {
     expect(run("k", { shape: textCode("circle") })).toBe(4.36);
     expect(run("k", { shape: textCode("triangle") })).toBeNaN();
@@ -202,7 +283,16 @@ describe("tables", () => {
   });
   test.each([
     [{ of: "x", how: "step", rows: [] }],
-    [{ of: "x", how: "linear", rows: [[2, 1], [1, 2]] }],
+    [
+      {
+        of: "x",
+        how: "linear",
+        rows: [
+          [2, 1],
+          [1, 2],
+        ],
+      },
+    ],
     [{ of: ["x", "y"], how: "bilinear", x: [1, 2], y: [1, 2], z: [[1, 2]] }],
   ] as const)("a table that is empty, unsorted or ragged is refused", (table) => {
     expect(() => compileProgram([["y", "t"]], { tables: { t: table } })).toThrow(/table t needs/);

@@ -9,13 +9,20 @@ import { escapeXml } from "../../src/equations/mathml.js";
 /** A number, a text, or a formula that begins with "=". */
 export type SheetCell = number | string;
 
-const program = ["/usr/bin/soffice", "/usr/local/bin/soffice", "/usr/bin/libreoffice", "/Applications/LibreOffice.app/Contents/MacOS/soffice"].find(existsSync);
+const program = [
+  "/usr/bin/soffice",
+  "/usr/local/bin/soffice",
+  "/usr/bin/libreoffice",
+  "/Applications/LibreOffice.app/Contents/MacOS/soffice",
+].find(existsSync);
 
 /** Whether the judge is on this machine. Under CI its absence is a failure, elsewhere it is said loudly. */
 export function canRecalculate(): boolean {
   if (program !== undefined) return true;
   if (process.env["CI"]) throw new Error("LibreOffice Calc is not installed; under CI the native formulas must be recalculated.");
-  console.warn("\n*** LibreOffice Calc is not on this machine: the native formulas are NOT recalculated by a second program in this run. ***\n");
+  console.warn(
+    "\n*** LibreOffice Calc is not on this machine: the native formulas are NOT recalculated by a second program in this run. ***\n",
+  );
   return false;
 }
 
@@ -28,7 +35,16 @@ export function recalculate(rows: readonly (readonly SheetCell[])[]): readonly (
     mkdirSync(join(profile, "user"), { recursive: true });
     writeFileSync(join(profile, "user", "registrymodifications.xcu"), alwaysRecalculate);
     const format = "csv:Text - txt - csv (StarCalc):44,34,76,1,,0,false,false,false,false,false,-1";
-    const args = [`-env:UserInstallation=${pathToFileURL(profile).href}`, "--headless", "--norestore", "--convert-to", format, "--outdir", folder, join(folder, "sheet.xlsx")];
+    const args = [
+      `-env:UserInstallation=${pathToFileURL(profile).href}`,
+      "--headless",
+      "--norestore",
+      "--convert-to",
+      format,
+      "--outdir",
+      folder,
+      join(folder, "sheet.xlsx"),
+    ];
     execFileSync(program as string, args, { stdio: "ignore", timeout: 180_000 });
     const answer = readdirSync(folder).find((name) => name.endsWith(".csv"));
     if (answer === undefined) throw new Error("LibreOffice wrote no sheet.");
