@@ -25,6 +25,9 @@ export function cautionsAt(point: Point): readonly string[] {
       "Buoyancy is taken from the densities at surface and bulk, because expansivity times difference misses their difference by more than 10 %; near a density maximum the flow may split.",
     );
   }
+  if (point.surface.motion === "free" && point.scene.spansDensityExtreme()) {
+    list.push(`The density of ${fluid.name} has an extreme between surface and bulk: the flow may split, and the bounds are widened for it.`);
+  }
   if (point.Ts >= longContactBurn) {
     list.push(
       point.Ts >= shortContactBurn

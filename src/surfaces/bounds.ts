@@ -53,6 +53,7 @@ export function boundsOf(surface: Surface, inputs: Inputs, solution: Solution): 
     ...rivalsOf(solution.point).flatMap((rival) => rivalShare(solution.point, rival, nominal)),
     ...limitShare(solution.point, nominal),
     ...buoyancyShare(solution.point, nominal),
+    ...splitShare(solution.point, nominal),
     ...edgeShare(surface, inputs, solution.point, nominal),
     ...switchShare(surface, inputs, solution, nominal),
   ];
@@ -235,6 +236,15 @@ function buoyancyShare(point: Point, nominal: Outcome): Share[] {
   return [
     shareOf("buoyancy by expansivity instead of by densities", "common practice", nominal, [scaled(point, other.h / point.h)]),
   ];
+}
+
+/** Across a density extreme the layer may split into streams up and down: no equation holds closer than by half. */
+const splitFlow = 0.5;
+
+function splitShare(point: Point, nominal: Outcome): Share[] {
+  if (point.surface.motion !== "free" || !point.scene.spansDensityExtreme()) return [];
+  const others = [scaled(point, 1 - splitFlow), scaled(point, 1 + splitFlow)];
+  return [shareOf("flow both ways across the density maximum", "common practice", nominal, others)];
 }
 
 /** Close to the edge of its range, the bounds also hold the equation that would be taken beyond it. */

@@ -33,6 +33,11 @@ export function candidatesFor(surface: Surface, at: Circumstances): readonly Cor
   return wanted === undefined ? all : named(wanted, all);
 }
 
+/** Records from memory are taken only where their surface prefers them or the user names them. */
+function isTakenUnasked(surface: Surface, record: Correlation): boolean {
+  return record.confidence !== "M" || surface.prefers.some((id) => record.id.startsWith(id));
+}
+
 /** The preferred equation in range; failing that, the one that is least far outside. */
 export function choose(surface: Surface, scene: Scene): Point | Problem {
   const { at, variant } = circumstancesOf(surface, scene);
@@ -41,7 +46,9 @@ export function choose(surface: Surface, scene: Scene): Point | Problem {
   let nearest: Point | undefined;
   let nearestBy = Number.POSITIVE_INFINITY;
   let trouble: Problem | undefined;
+  const asked = at.inputs.equation !== undefined || at.inputs.only !== undefined;
   for (const record of candidates as readonly Correlation[]) {
+    if (!asked && !isTakenUnasked(surface, record)) continue;
     const point = evaluateWith(surface, scene, at, runnerOf(surface, record, variant), variant.buoyancy === "densities");
     if (isProblem(point)) {
       trouble ??= point;

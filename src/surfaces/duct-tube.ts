@@ -12,7 +12,8 @@ const turbulentFrom = 4000;
 /** Liquid metals never use the ordinary turbulent laws. */
 const metalBelow = 0.05;
 
-const ordinary = serving("DUCT.TUBE", ["tube-default-T-mean", "tube-default-T-local", "tube-default-H-mean", "tube-default-H-local"]);
+const prefers = ["tube-default-T-mean", "tube-default-T-local", "tube-default-H-mean", "tube-default-H-local"];
+const ordinary = serving("DUCT.TUBE", prefers);
 
 const corrected = new Map<string, Correlation>();
 
@@ -148,6 +149,7 @@ export const ductTube: Surface = {
   check,
   beside: [friction],
   candidates,
+  prefers,
   rivals,
   preference: "laminar limits joined (developed and Lévêque), Gnielinski 2013 through transition and beyond, with the property ratio",
   regime: (_, value) => {

@@ -3,6 +3,8 @@ import { serving } from "./candidates.js";
 import { mixedRivals } from "./mixing.js";
 import type { Surface } from "./surface.js";
 
+const prefers = ["churchill-bernstein-1977", "zukauskas-1972-cylinder", "hilpert-1933-revised"];
+
 /** A long cylinder across a stream. */
 export const forcedCylinder: Surface = {
   id: "FORCED.CYLINDER",
@@ -17,7 +19,8 @@ export const forcedCylinder: Surface = {
   ],
   settings: [],
   groups: () => ({ L: "diameter" }),
-  candidates: serving("FORCED.CYLINDER", ["churchill-bernstein-1977", "zukauskas-1972-cylinder", "hilpert-1933-revised"]),
+  candidates: serving("FORCED.CYLINDER", prefers),
+  prefers,
   preference: "Churchill & Bernstein 1977: one continuous line over all Re and Pr",
   rivals: (_, value, chosen) =>
     mixedRivals(value("Ri"), chosen, correlationById("churchill-chu-1975-cylinder-all"), correlationById("churchill-1977-cylinder-along")),

@@ -8,7 +8,7 @@ import type { Circumstances, Rival, Surface, Values } from "./surface.js";
 const transition = 5e5;
 const settled = 1e7;
 
-const naturally = serving("FORCED.PLATE", [
+const laminarFirst = [
   "pohlhausen-1921-mean",
   "pohlhausen-1921-local",
   "colburn-1933-plate-mixed",
@@ -16,8 +16,12 @@ const naturally = serving("FORCED.PLATE", [
   "churchill-ozoe-1973-local",
   "churchill-ozoe-1973-flux-mean",
   "churchill-ozoe-1973-flux-local",
-]);
-const tripped = serving("FORCED.PLATE", ["colburn-1933-plate-mean-tripped", "petukhov-plate-turbulent", "white-plate-local", "colburn-1933-plate-local"]);
+  "lienhard-2020-plate-local",
+  "white-plate-local",
+];
+const turbulentFirst = ["colburn-1933-plate-mean-tripped", "petukhov-plate-turbulent", "white-plate-local"];
+const naturally = serving("FORCED.PLATE", laminarFirst);
+const tripped = serving("FORCED.PLATE", turbulentFirst);
 
 const unheated = {
   laminar: { mean: "unheated-length-laminar-mean", local: "unheated-length-laminar-local" },
@@ -53,7 +57,7 @@ function isTurbulent(record: Correlation): boolean {
 }
 
 function candidates(at: Circumstances): readonly Correlation[] {
-  const list = at.inputs.words.boundaryLayer === "tripped" ? tripped(at) : naturally(at);
+  const list = at.inputs.words.boundaryLayer === "tripped" ? tripped(at).filter(isTurbulent) : naturally(at);
   return at.inputs.numbers.unheatedLength === undefined ? list : list.map(afterUnheatedLength);
 }
 
@@ -98,6 +102,7 @@ export const forcedPlate: Surface = {
     ...roughnessLines(given),
   }),
   candidates,
+  prefers: [...laminarFirst, ...turbulentFirst],
   preference: "Pohlhausen while laminar (Churchill & Ozoe beyond ordinary Pr), then laminar and turbulent parts in one line, transition at Re 5e5",
   rivals,
   regime: (at, value) => {

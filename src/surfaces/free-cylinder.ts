@@ -1,6 +1,8 @@
 import { serving } from "./candidates.js";
 import type { Surface } from "./surface.js";
 
+const prefers = ["churchill-chu-1975-cylinder-all", "churchill-chu-1975-cylinder-laminar", "morgan-1975-free-cylinder"];
+
 /** A long horizontal cylinder or wire in still fluid. */
 export const freeCylinder: Surface = {
   id: "FREE.CYLINDER",
@@ -12,7 +14,8 @@ export const freeCylinder: Surface = {
   arguments: [{ key: "diameter", name: "diameter", dimensions: ["length"], sign: "positive", describe: "outside diameter, m" }],
   settings: [],
   groups: () => ({ L: "diameter" }),
-  candidates: serving("FREE.CYLINDER", ["churchill-chu-1975-cylinder-all", "churchill-chu-1975-cylinder-laminar", "morgan-1975-free-cylinder"]),
+  candidates: serving("FREE.CYLINDER", prefers),
+  prefers,
   preference: "Churchill & Chu 1975 for all Ra: continuous, with a limit as Ra goes to zero",
   regime: (_, value) => (value("Ra") < 1e9 ? "laminar" : "turbulent"),
 };

@@ -2,8 +2,10 @@ import type { Correlation } from "../correlations/correlation.js";
 import { serving } from "./candidates.js";
 import type { Circumstances, Surface } from "./surface.js";
 
-const unstable = serving("FREE.TOPFACE", ["raithby-hollands-1998-top", "hedh-1983-top", "lloyd-moran-1974-top-turbulent", "lloyd-moran-1974-top-laminar"]);
-const stable = serving("FREE.UNDERSIDE", ["raithby-hollands-1998-under", "hedh-1983-under", "mcadams-1954-under"]);
+const whenLeaving = ["raithby-hollands-1998-top", "hedh-1983-top", "lloyd-moran-1974-top-turbulent"];
+const whenHeld = ["raithby-hollands-1998-under", "mcadams-1954-under"];
+const unstable = serving("FREE.TOPFACE", whenLeaving);
+const stable = serving("FREE.UNDERSIDE", whenHeld);
 
 const sides = [
   { key: "length", name: "length", dimensions: ["length"], sign: "positive", describe: "one side of the face, m" },
@@ -41,6 +43,7 @@ function face(id: "FREE.TOPFACE" | "FREE.UNDERSIDE", title: string, describe: st
     settings: [],
     groups: () => groups,
     candidates: (at): readonly Correlation[] => (leaves(at) ? unstable(at) : stable(at)),
+    prefers: [...whenLeaving, ...whenHeld],
     preference: "Raithby & Hollands 1998 for the side that buoyancy decides: continuous over all Ra",
     area: "length*width",
     regime: (at, value) => regime(value, leaves(at)),

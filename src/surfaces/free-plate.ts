@@ -2,14 +2,15 @@ import type { Correlation } from "../correlations/correlation.js";
 import { serving } from "./candidates.js";
 import type { Circumstances, Surface } from "./surface.js";
 
-const upright = serving("FREE.PLATE", [
+const prefers = [
   "raithby-hollands-1998-plate",
   "churchill-chu-1975-plate-all",
   "churchill-chu-1975-plate-laminar",
   "raithby-hollands-1998-plate-flux",
   "raithby-hollands-1998-tilted-up",
   "raithby-hollands-1998-tilted-down",
-]);
+];
+const upright = serving("FREE.PLATE", prefers);
 
 function tiltOf(at: Circumstances): number {
   return at.inputs.numbers.slope ?? 0;
@@ -46,6 +47,7 @@ export const freePlate: Surface = {
   ],
   groups: ({ local, given }) => ({ L: local ? "position" : "height", ...(given.has("slope") ? { tilt: "ABS(slope)" } : {}) }),
   candidates,
+  prefers,
   preference: "Raithby & Hollands 1998: continuous through transition, the exact layer as its laminar limit",
   regime: (_, value) => (value("Ra") < 1e9 ? "laminar" : "turbulent"),
   // Similarity under a uniform flux: the difference grows with x^(1/5) while laminar, so its largest is 6/5 of its mean.

@@ -79,6 +79,13 @@ export class Scene {
     return this.densities;
   }
 
+  /** A density extreme lies between surface and bulk (water around 4 °C): the layer may flow both ways at once. */
+  spansDensityExtreme(): boolean {
+    if (this.bulk.phase !== "liquid" || this.bulk.expansivity === undefined) return false;
+    const wall = this.state(1);
+    return !isProblem(wall) && wall.expansivity !== undefined && wall.expansivity * this.bulk.expansivity < 0;
+  }
+
   /** How buoyancy acts at the film: its size by expansivity and by densities, which of them counts, and its direction. */
   buoyancy(): Buoyancy {
     const film = this.state(0.5);

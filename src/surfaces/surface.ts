@@ -119,6 +119,8 @@ export interface Surface {
   check?(inputs: Inputs): Problem | undefined;
   /** Published equations for the circumstances, in order of preference. */
   candidates(at: Circumstances): readonly Correlation[];
+  /** Ids of the records that stand in front; those from memory are taken without being named only if they are among these. */
+  readonly prefers: readonly string[];
   /** Why the first of them stands first: for help and the pane. */
   readonly preference: string;
   rivals?(at: Circumstances, value: Values, chosen: Correlation): readonly Rival[];

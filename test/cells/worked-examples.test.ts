@@ -87,6 +87,7 @@ const examples: readonly Example[] = [
   { id: "F32", source: `${sukhatme}, ex. 6.4`, call: "FREE.CYLINDER", fluid: { k: 0.0763, nu: 155.1e-6, Pr: 0.717, beta: 1 / 1173, rho: 1 }, args: { surface: 1000, bulk: 800, diameter: "6 mm" }, give: "q", settings: "equation=Churchill & Chu laminar; gravity=9.81", expected: 2722.9, within: 0.001, origin: "published" },
   { id: "E03", source: `${incropera}, ex. 7.2`, call: "FORCED.PLATE", fluid: e03, args: { surface: 230, bulk: 25, speed: 60, length: 0.05 }, give: "q", settings: "equation=Pohlhausen", times: 0.05, expected: 1370.2, within: 0.003, origin: "published" },
   { id: "E07", source: `${incropera}, ex. 7.4`, call: "FORCED.CYLINDER", fluid: { k: 0.03, nu: 20.92e-6, Pr: 0.7, rho: 1 }, args: { surface: 128.4, bulk: 26.2, speed: 10, diameter: "12.7 mm" }, give: "Nu", expected: 40.636, within: 0.005, origin: "from memory" },
+  { id: "E13a", source: `${holman}, ex. 5.5 (first pass, properties of the free stream)`, call: "FORCED.PLATE", fluid: { k: 0.02624, nu: 15.69e-6, Pr: 0.7, rho: 1 }, args: { surface: `${1000 / 0.36} W/m2`, bulk: "0 °C", speed: 5, length: 0.6 }, give: "Ts", expected: 240.76, within: 0.003, origin: "published" },
   { id: "E15", source: `${holman}, ex. 5.7`, call: "FORCED.PLATE", fluid: { k: 0.144, nu: 2.4e-4, Pr: 2870, rho: 876 }, args: { surface: 60, bulk: 20, speed: 1.2, length: 0.2 }, give: "h", settings: "equation=Churchill & Ozoe", expected: 219.15, within: 0.001, origin: "published" },
   { id: "E17", source: `${holman}, ex. 6.7`, call: "FORCED.CYLINDER", fluid: { k: 0.0312, mu: 2.14e-5, rho: 0.966, Pr: 0.695 }, args: { surface: 150, bulk: 35, speed: 50, diameter: 0.05 }, give: "q", settings: `${any}equation=Hilpert revised`, times: Math.PI * 0.05, expected: 3100.7, within: 0.03, origin: "published" },
   { id: "E22", source: `${cengel}, ex. 7.2a`, call: "FORCED.PLATE", fluid: { k: 0.02953, nu: 2.097e-5 / 0.823, Pr: 0.7154, rho: 1 }, args: { surface: 140, bulk: 20, speed: 8, length: 6 }, give: "Nu", settings: "equation=Colburn laminar then turbulent at 5e5", expected: 2686.4, within: 0.005, origin: "from memory" },
@@ -112,4 +113,17 @@ test.each(examples)("$id $call $give ($source; $origin)", (example) => {
   expect(typeof cell === "object" ? (cell as { message: string }).message : typeof cell).toBe("number");
   const got = (cell as number) * (example.times ?? 1);
   expect(Math.abs(got / example.expected - 1), `${got} against ${example.expected}`).toBeLessThanOrEqual(example.within);
+});
+
+// Incropera et al., ex. 7.2: six heaters of 50 mm along a plate; a heater's share is the difference of two mean values.
+test.each([
+  ["E04 heater 5", 0.25, 0.2, "Colburn laminar then turbulent at 5e5", "Pohlhausen", 1017.5, 0.03],
+  ["E05 heater 6", 0.3, 0.25, "Colburn laminar then turbulent at 5e5", "Colburn laminar then turbulent at 5e5", 1427.6, 0.01],
+] as const)("%s as the difference of two plates", (_, to, from, equationTo, equationFrom, expected, within) => {
+  const heat = (length: number, equation: string): number => {
+    const args = { fluid: table(e03), surface: [[230]], bulk: [[25]], speed: [[60]], length: [[length]] };
+    const [[q] = []] = answer("FORCED.PLATE", args, [["q"]], [[`beyond range=flag; equation=${equation}`]]);
+    return (q as number) * length;
+  };
+  expect(Math.abs((heat(to, equationTo) - heat(from, equationFrom)) / expected - 1)).toBeLessThanOrEqual(within);
 });
