@@ -26,9 +26,10 @@ class Pane {
     private readonly pages: readonly Page[],
   ) {
     root.classList.add("pane");
-    this.content = render(el("main", { class: "page", id: "page" })) as HTMLElement;
+    this.content = render(el("div", { class: "page", id: "page" })) as HTMLElement;
     this.says = render(el("p", { class: "says", role: "status" })) as HTMLElement;
-    root.replaceChildren(render(this.head()), this.content, this.says);
+    if (pages.length > 1) root.replaceChildren(render(this.head()), this.content, this.says);
+    else root.replaceChildren(this.content, this.says);
     void this.followTheme();
     this.stopTheme = host.onThemeChanged?.(() => void this.followTheme()) ?? ((): void => undefined);
     this.open(pages[0]?.id ?? "this-cell", {});
@@ -41,17 +42,9 @@ class Pane {
   }
 
   private head(): ReturnType<typeof el> {
-    return el(
-      "header",
-      { class: "head" },
-      el("h1", { class: this.pages.length > 1 ? "unseen" : "" }, words.title),
-      this.pages.length > 1 &&
-        el(
-          "nav",
-          { "aria-label": words.pages.navigation },
-          el("ul", { class: "tabs" }, ...this.pages.map((page) => el("li", {}, el("button", { type: "button", class: "tab", id: `tab-${page.id}`, click: () => this.open(page.id, {}) }, page.title)))),
-        ),
-    );
+    const tab = (page: Page): ReturnType<typeof el> =>
+      el("li", {}, el("button", { type: "button", class: "tab", id: `tab-${page.id}`, click: () => this.open(page.id, {}) }, page.title));
+    return el("nav", { class: "head", "aria-label": words.pages.navigation }, el("ul", { class: "tabs" }, ...this.pages.map(tab)));
   }
 
   private open(id: PageId, errand: Errand): void {

@@ -131,7 +131,7 @@ export const words = {
     kept: "Kept in this browser",
     keeping: "Keeping …",
     notKept: (why: string): string => `Not kept: ${why}. Copy what you need before you leave.`,
-    theme: "Light or dark",
+    theme: { system: "Theme: system", dark: "Theme: dark", light: "Theme: light" },
     starting: "Opening the sheet …",
     failed: (why: string): string => `The sheet could not be opened: ${why}`,
     unreadable: "What was kept in this browser could not be read; the example is shown. Your kept sheet is left alone until you change something.",

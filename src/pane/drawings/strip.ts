@@ -1,6 +1,6 @@
 /** A range strip: the published interval of one group, and where the case lies in it. A pure model, then a drawing of it. */
 import type { RangeTest } from "../../findings/finding.js";
-import { figure } from "../figures.js";
+import { figure, raisedPowers } from "../figures.js";
 import { type PageElement, svg } from "../node.js";
 import { words } from "../words.js";
 import { along, type Axis, marks } from "./axis.js";
@@ -30,9 +30,13 @@ export function stripOf(test: RangeTest): Strip {
     interval: { from: openLow ? 0 : along(axis, test.low), to: openHigh ? 1 : along(axis, test.high), openLow, openHigh },
     point: { at: Math.min(1, Math.max(0, at)), beyond: at < 0 ? "low" : at > 1 ? "high" : undefined },
     within: test.within,
-    marks: marks(axis, mostMarks).map((value) => ({ at: along(axis, value), text: figure(value) })),
+    marks: marks(axis, mostMarks).map((value) => ({ at: along(axis, value), text: axis.scale === "log" ? powerOfTen(value) : figure(value) })),
     says: words.ranges.sentence(test.symbol, figure(test.value), figure(test.low), figure(test.high), test.within, test.source),
   };
+}
+
+function powerOfTen(value: number): string {
+  return Math.abs(Math.log10(value)) < 3.5 ? figure(value) : raisedPowers(value.toExponential());
 }
 
 /** Logarithmic where the interval spans more than a decade and a half, or is open, and everything is above zero. */
