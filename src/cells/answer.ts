@@ -29,7 +29,15 @@ function dispatch(id: string, args: Arguments, give?: CellBlock | null, settings
   if (id === "LIST") return answerList(args.what, args.filter);
   const state = stateFunctions.find((one) => one.id === id);
   if (state !== undefined) return answerState(state, args, settings);
-  return [[errorOf(id === "" ? valueProblem(undefined, "a function is needed.") : coverageProblem(undefined, `FILM.${id} is not a function of this version.`))]];
+  return [
+    [
+      errorOf(
+        id === ""
+          ? valueProblem(undefined, "a function is needed.")
+          : coverageProblem(undefined, `FILM.${id} is not a function of this version.`),
+      ),
+    ],
+  ];
 }
 
 export { explain } from "./explain.js";

@@ -14,14 +14,21 @@ export function traceBlock(finding: Finding, system: "SI" | "US"): CellValue[][]
     rows.push([step.symbol, step.meaning, step.value, step.unit, step.line === undefined ? (step.note ?? step.kind) : `= ${step.line}`]);
   }
   for (const test of finding.rangeTests()) {
-    rows.push([test.symbol, `range of ${test.source}, ${test.origin}`, test.value, "", `${test.low} to ${test.high}: ${test.within ? "inside" : "outside"}`]);
+    rows.push([
+      test.symbol,
+      `range of ${test.source}, ${test.origin}`,
+      test.value,
+      "",
+      `${test.low} to ${test.high}: ${test.within ? "inside" : "outside"}`,
+    ]);
   }
   if (finding.answered) {
     for (const share of finding.contributions()) {
       rows.push(["h", share.cause, share.above, "W/(m²·K)", `up; ${share.below} down; ${share.origin}`]);
     }
     const unit = defaultUnit("film coefficient", system).symbol;
-    for (const word of ["h low", "h high"]) rows.push([word, "about 95 %", render(finding.word(word), system), unit, "contributions combined"]);
+    for (const word of ["h low", "h high"])
+      rows.push([word, "about 95 %", render(finding.word(word), system), unit, "contributions combined"]);
   }
   rows.push(["verdict", finding.verdict, "", "", ""]);
   for (const caution of finding.cautions()) rows.push(["caution", caution, "", "", ""]);

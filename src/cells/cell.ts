@@ -3,7 +3,22 @@
 /** An error in a cell: the host's entry turns it into the platform's own error object. */
 export class CellError {
   constructor(
-    readonly code: "#VALUE!" | "#N/A" | "#DIV/0!" | "#NUM!" | "#NAME?" | "#REF!" | "#NULL!" | "#SPILL!" | "#CALC!" | "#BUSY!" | "#GETTING_DATA" | "#FIELD!" | "#BLOCKED!" | "#CONNECT!" | "#UNKNOWN!",
+    readonly code:
+      | "#VALUE!"
+      | "#N/A"
+      | "#DIV/0!"
+      | "#NUM!"
+      | "#NAME?"
+      | "#REF!"
+      | "#NULL!"
+      | "#SPILL!"
+      | "#CALC!"
+      | "#BUSY!"
+      | "#GETTING_DATA"
+      | "#FIELD!"
+      | "#BLOCKED!"
+      | "#CONNECT!"
+      | "#UNKNOWN!",
     readonly message: string = "",
   ) {}
 }

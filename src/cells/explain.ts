@@ -31,7 +31,16 @@ function explainSurface(
   at: { readonly row: number; readonly column: number },
 ): Explanation {
   const call = openSurfaceCall(surface, args, give, settings);
-  const base = { functionId: surface.id, title: surface.title, word: "h", value: undefined, finding: undefined, units: "SI" as const, caseNumber: 1, cases: 1 };
+  const base = {
+    functionId: surface.id,
+    title: surface.title,
+    word: "h",
+    value: undefined,
+    finding: undefined,
+    units: "SI" as const,
+    caseNumber: 1,
+    cases: 1,
+  };
   if ("problems" in call) return { ...base, problems: call.problems, inputs: inputsGiven(surface, args) };
   const { row, column, word } = placeOf(call, at);
   const wanted = call.request.wanted[word];
@@ -76,7 +85,12 @@ function placeOf(call: SurfaceCall, at: { readonly row: number; readonly column:
 }
 
 function inputsGiven(surface: Surface, args: Arguments, row = 0, column = 0): readonly InputShown[] {
-  const describes = ["name of the fluid, or a property table", "temperature or heat flux", "bulk temperature", ...surface.arguments.map((one) => one.describe)];
+  const describes = [
+    "name of the fluid, or a property table",
+    "temperature or heat flux",
+    "bulk temperature",
+    ...surface.arguments.map((one) => one.describe),
+  ];
   return argumentNames(surface).map((name, i) => {
     const block = args[keyOfName(name)];
     const cell = block === null || block === undefined ? "" : i === 0 && block.length > 1 ? "property table" : cellAt(block, row, column);

@@ -37,7 +37,13 @@ export const fluidWords: readonly WordEntry[] = [
   { name: "phase", kind: "text", describe: "liquid, gas or supercritical" },
   ...numbers.map(([name, , describe]): WordEntry => ({ name, kind: "number", describe })),
   ...(["liquid", "vapour"] as const).flatMap((side) =>
-    saturated.map((name): WordEntry => ({ name: `saturated ${side} ${name}`, kind: "number", describe: `${name} of saturated ${side} at the temperature asked` })),
+    saturated.map(
+      (name): WordEntry => ({
+        name: `saturated ${side} ${name}`,
+        kind: "number",
+        describe: `${name} of saturated ${side} at the temperature asked`,
+      }),
+    ),
   ),
   { name: "range", kind: "text", describe: "limits of the formulation" },
   { name: "source", kind: "text", describe: "published formulation" },
@@ -76,7 +82,9 @@ export function rangeText(fluid: { readonly range: Fluid["range"] }): string {
   const { T, p } = fluid.range;
   const span = (low: number, high: number, dimension: Dimension): string => {
     if (!Number.isFinite(high)) return Number.isFinite(low) && low > 0 ? `from ${formatQuantity(low, dimension, "SI")}` : "";
-    return low > 0 ? `${formatQuantity(low, dimension, "SI")} to ${formatQuantity(high, dimension, "SI")}` : `up to ${formatQuantity(high, dimension, "SI")}`;
+    return low > 0
+      ? `${formatQuantity(low, dimension, "SI")} to ${formatQuantity(high, dimension, "SI")}`
+      : `up to ${formatQuantity(high, dimension, "SI")}`;
   };
   const parts = [span(T[0], T[1], "temperature"), span(p[0], p[1], "pressure")].filter((part) => part !== "");
   return parts.length === 0 ? "no limits" : parts.join("; ");
@@ -88,6 +96,7 @@ function numberWord(name: string, fluid: Fluid, state: State | Problem, T: numbe
   const constant = fixedWord(name, fluid, T, p);
   if (constant !== undefined) return isProblem(constant) ? constant : { value: constant, dimension };
   if (isProblem(state)) return state;
+  if (fluid.densityAssumed === true && (name === "density" || name === "cp" || name === "viscosity")) return lacking(name, fluid);
   const value = propertyOf(name, state);
   return value === undefined ? lacking(name, fluid) : { value, dimension };
 }
@@ -116,7 +125,11 @@ function fixedWord(name: string, fluid: Fluid, T: number, p: number): number | P
   }
 }
 
-function fromSaturation(found: Saturation | Problem | undefined, fluid: Fluid, of: (one: Saturation) => number | undefined): number | Problem {
+function fromSaturation(
+  found: Saturation | Problem | undefined,
+  fluid: Fluid,
+  of: (one: Saturation) => number | undefined,
+): number | Problem {
   if (found === undefined) return coverageProblem("fluid", `${fluid.name} has no saturation data here.`);
   if (isProblem(found)) return found;
   return of(found) ?? coverageProblem("fluid", `no published value of ${fluid.name} covers this.`);

@@ -80,14 +80,7 @@ export function rayleigh(fluid: any[][], surface: any[][], bulk: any[][], length
  * @param settings Such as "pressure=2 bar"
  * @returns Ri
  */
-export function richardson(
-  fluid: any[][],
-  surface: any[][],
-  bulk: any[][],
-  speed: any[][],
-  length: any[][],
-  settings?: any[][],
-): any[][] {
+export function richardson(fluid: any[][], surface: any[][], bulk: any[][], speed: any[][], length: any[][], settings?: any[][]): any[][] {
   return answer("RICHARDSON", { fluid, surface, bulk, speed, length }, null, settings);
 }
 

@@ -1,12 +1,12 @@
 import type { Fluid } from "../fluids/fluid.js";
 import { ownTable } from "../fluids/own-table.js";
-import { findFluid } from "../fluids/shelf.js";
 import { isProblem, type Problem, valueProblem } from "../quantities/problems.js";
 import type { Dimension, Quantity, Reading } from "../quantities/quantity.js";
 import { readQuantity } from "../quantities/reading.js";
 import type { ArgumentDefinition, FlowKind, Inputs, Surface, Tolerance, Wall } from "../surfaces/surface.js";
 import { type CellBlock, isErrorCell, quoted } from "./cell.js";
 import { isBlank, isBlankOrZero } from "./cases.js";
+import { namedFluid } from "./make-up.js";
 import type { Settled } from "./settings.js";
 
 /** The raw cells of one case, before anything is read. */
@@ -39,14 +39,6 @@ export function readFluid(block: CellBlock, reading: Reading): Fluid | readonly 
   return isProblem(found) ? [found] : (found as Fluid);
 }
 
-export function fluidByName(cell: unknown): Fluid | Problem {
-  if (typeof cell !== "string") {
-    return valueProblem("fluid", `${quoted(cell)} is not the name of a fluid; write a name such as "air", or give a property table.`);
-  }
-  const found = findFluid(cell);
-  return isProblem(found) && found.argument === undefined ? { ...found, argument: "fluid" } : found;
-}
-
 /** Reads one case of a surface function. */
 export function readCase(surface: Surface, raw: RawCase, fluid: Fluid | readonly Problem[] | undefined, settled: Settled): ReadCase {
   const cells = [raw.fluid, raw.surface, raw.bulk, ...raw.others];
@@ -57,7 +49,7 @@ export function readCase(surface: Surface, raw: RawCase, fluid: Fluid | readonly
   const problems: Problem[] = [];
   const remarks: string[] = [];
   const tolerances: Tolerance[] = [...settled.tolerances];
-  const found = fluid ?? fluidByName(raw.fluid);
+  const found = fluid ?? namedFluid(raw.fluid, settled);
   if (Array.isArray(found)) problems.push(...(found as readonly Problem[]));
   else if (isProblem(found)) problems.push(found);
 
@@ -89,12 +81,19 @@ export function readCase(surface: Surface, raw: RawCase, fluid: Fluid | readonly
     numbers[argument.key] = quantity.value;
     if (argument.key === "flow") flow = quantity.dimension as FlowKind;
   });
+  if (flow === "mass flow" && !Array.isArray(found) && (found as Fluid).densityAssumed === true) {
+    problems.push(
+      valueProblem("fluid", "the property table gives no density, which a mass flow needs; add the column density, or give a speed."),
+    );
+  }
   if (problems.length > 0) return { kind: "problems", problems };
+  const moist = (found as Fluid).atBulk?.((bulkQuantity as Quantity).value, settled.pressure);
+  if (moist !== undefined && isProblem(moist)) return { kind: "problems", problems: [moist] };
 
   const wall = wallQuantity as Quantity;
   const driven: Wall = wall.dimension === "heat flux" ? { kind: "flux", q: wall.value } : { kind: "temperature", T: wall.value };
   const inputs: Inputs = {
-    fluid: found as Fluid,
+    fluid: moist ?? (found as Fluid),
     wall: driven,
     Tb: (bulkQuantity as Quantity).value,
     pressure: settled.pressure,
@@ -122,7 +121,9 @@ export function readCase(surface: Surface, raw: RawCase, fluid: Fluid | readonly
 function isBlankCase(surface: Surface, raw: RawCase): boolean {
   if (raw.fromRanges.length > 0 && raw.fromRanges.every(isBlankOrZero)) return true;
   if (isBlank(raw.fluid)) return true;
-  return surface.arguments.some((argument, i) => argument.optional !== true && argument.sign === "positive" && isBlankOrZero(raw.others[i]));
+  return surface.arguments.some(
+    (argument, i) => argument.optional !== true && argument.sign === "positive" && isBlankOrZero(raw.others[i]),
+  );
 }
 
 export function readCell(cell: unknown, dimensions: readonly Dimension[], name: string, settled: Settled): Quantity | Problem {

@@ -13,7 +13,6 @@ import { fluidWords, rangeText } from "./fluid-function.js";
 import { errorOf } from "./render.js";
 import { stateFunctions } from "./state-functions.js";
 
-
 const lists: Readonly<Record<string, () => { readonly head: readonly string[]; readonly rows: readonly CellValue[][] }>> = {
   fluids: () => ({
     head: ["fluid", "also", "family", "range", "uncertainty", "source"],
@@ -32,7 +31,9 @@ const lists: Readonly<Record<string, () => { readonly head: readonly string[]; r
       ...allSurfaces.map((surface) => [
         `FILM.${surface.id}`,
         surface.title,
-        ["fluid", surface.wallName, "bulk", ...surface.arguments.map((one) => (one.optional === true ? `[${one.name}]` : one.name))].join(", "),
+        ["fluid", surface.wallName, "bulk", ...surface.arguments.map((one) => (one.optional === true ? `[${one.name}]` : one.name))].join(
+          ", ",
+        ),
         surface.preference,
         surface.reference,
       ]),
@@ -68,7 +69,9 @@ const lists: Readonly<Record<string, () => { readonly head: readonly string[]; r
     rows: [
       ...commonSettings.map((one) => [one.name, one.describe + choices(one.words), "every function"]),
       ["unit of NAME", "unit of bare numbers of one argument, such as unit of diameter=mm", "every function"],
-      ...allSurfaces.flatMap((surface) => surface.settings.map((one) => [one.name, one.describe + choices(one.words), `FILM.${surface.id}`])),
+      ...allSurfaces.flatMap((surface) =>
+        surface.settings.map((one) => [one.name, one.describe + choices(one.words), `FILM.${surface.id}`]),
+      ),
     ],
   }),
   words: () => ({
@@ -95,7 +98,9 @@ export function answerList(what: CellBlock | null | undefined, filter: CellBlock
   const name = typeof asked === "string" ? asked.trim().toLowerCase() : "";
   const list = lists[name];
   if (list === undefined) {
-    const known = Object.keys(lists).map((one) => `"${one}"`).join(", ");
+    const known = Object.keys(lists)
+      .map((one) => `"${one}"`)
+      .join(", ");
     return [[errorOf(valueProblem("what", `${isBlankOrZero(asked) ? "nothing" : quoted(asked)} is not a list; write one of ${known}.`))]];
   }
   const { head, rows } = list();
@@ -104,6 +109,9 @@ export function answerList(what: CellBlock | null | undefined, filter: CellBlock
     const text = row.join(" ").toLowerCase();
     return wanted.every((word) => text.includes(word));
   });
-  if (kept.length === 0) return [[errorOf(valueProblem("filter", `no row of ${name} holds all of "${wanted.join(" ")}"; leave the filter out to see them all.`))]];
+  if (kept.length === 0)
+    return [
+      [errorOf(valueProblem("filter", `no row of ${name} holds all of "${wanted.join(" ")}"; leave the filter out to see them all.`))],
+    ];
   return [head.slice(), ...kept];
 }

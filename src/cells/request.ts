@@ -38,7 +38,8 @@ function readWord(cell: unknown, words: readonly WordEntry[]): Wanted | Problem 
   const word = lookUp((bracketed[1] as string).trim(), words);
   if (word === undefined) return unknown(text, words);
   const unit = findUnit((bracketed[2] as string).trim());
-  if (unit === undefined) return valueProblem("give", `"${bracketed[2]}" in "${text}" is not a unit known here; FILM.LIST("units") lists them.`);
+  if (unit === undefined)
+    return valueProblem("give", `"${bracketed[2]}" in "${text}" is not a unit known here; FILM.LIST("units") lists them.`);
   return { word, unit };
 }
 
@@ -51,7 +52,10 @@ function unknown(text: string, words: readonly WordEntry[]): Problem {
   const first = text.toLowerCase().slice(0, 2);
   const near = words.filter((word) => word.name.toLowerCase().startsWith(first) || word.name.toLowerCase().includes(text.toLowerCase()));
   const list = (near.length > 0 ? near : words).slice(0, 12).map((word) => `"${word.name}"`);
-  return valueProblem("give", `"${text}" is not a word known here; write ${near.length > 0 ? "perhaps " : "one of "}${list.join(", ")}${near.length > 0 || words.length <= 12 ? "" : ' … (FILM.LIST("words") lists all)'}.`);
+  return valueProblem(
+    "give",
+    `"${text}" is not a word known here; write ${near.length > 0 ? "perhaps " : "one of "}${list.join(", ")}${near.length > 0 || words.length <= 12 ? "" : ' … (FILM.LIST("words") lists all)'}.`,
+  );
 }
 
 export function isWanted(one: Wanted | Problem | undefined): one is Wanted {

@@ -49,7 +49,10 @@ function isKnown(name: string, known: readonly SettingDefinition[]): boolean {
 }
 
 function unknownName(name: string, known: readonly SettingDefinition[]): Problem {
-  return valueProblem("settings", `"${name}" is not a setting here; known are ${known.map((one) => one.name).join(", ")} and unit of NAME.`);
+  return valueProblem(
+    "settings",
+    `"${name}" is not a setting here; known are ${known.map((one) => one.name).join(", ")} and unit of NAME.`,
+  );
 }
 
 function fromText(cell: unknown, known: readonly SettingDefinition[]): RawSettings | Problem {
@@ -111,6 +114,9 @@ export interface Settled {
   readonly area: number | undefined;
   readonly emissivity: number | undefined;
   readonly surroundings: number | undefined;
+  /** Relative humidity as a fraction, and dew point in kelvin: at most one of them. */
+  readonly humidity: number | undefined;
+  readonly dewPoint: number | undefined;
   readonly numbers: Readonly<Record<string, number>>;
   readonly words: Readonly<Record<string, string>>;
   readonly texts: Readonly<Record<string, string>>;
@@ -155,6 +161,9 @@ export function settle(raw: ReadonlyMap<string, unknown>, known: readonly Settin
   if (quantities.has("sandRoughness") && quantities.has("profileRoughness")) {
     problems.push(valueProblem("sand roughness", "and profile roughness are both given; give one of them."));
   }
+  if (quantities.has("humidity") && quantities.has("dewPoint")) {
+    problems.push(valueProblem("humidity", "and dew point are both given; give one of them."));
+  }
   if (quantities.has("emissivity") !== quantities.has("surroundings")) {
     const missing = quantities.has("emissivity") ? "surroundings" : "emissivity";
     problems.push(valueProblem(missing, `is missing; radiation needs both, such as "emissivity=0.9; surroundings=20".`));
@@ -163,7 +172,7 @@ export function settle(raw: ReadonlyMap<string, unknown>, known: readonly Settin
   return assemble(system, reading, units, quantities, words, texts, known);
 }
 
-const fields = new Set(["pressure", "gravity", "area", "emissivity", "surroundings", "altitude"]);
+const fields = new Set(["pressure", "gravity", "area", "emissivity", "surroundings", "altitude", "humidity", "dewPoint"]);
 
 function assemble(
   system: "SI" | "US",
@@ -178,7 +187,14 @@ function assemble(
   const tolerances: Tolerance[] = [];
   for (const [key, quantity] of quantities) {
     if (!fields.has(key)) numbers[key] = inDegrees(quantity);
-    if (quantity.tolerance !== undefined && quantity.tolerance > 0 && key !== "altitude" && key !== "area") {
+    if (
+      quantity.tolerance !== undefined &&
+      quantity.tolerance > 0 &&
+      key !== "altitude" &&
+      key !== "area" &&
+      key !== "humidity" &&
+      key !== "dewPoint"
+    ) {
       const name = known.find((one) => one.key === key)?.name ?? key;
       tolerances.push({ key, name, halfWidth: quantity.dimension === "angle" ? degrees(quantity.tolerance) : quantity.tolerance });
     }
@@ -192,6 +208,8 @@ function assemble(
     area: quantities.get("area")?.value,
     emissivity: quantities.get("emissivity")?.value,
     surroundings: quantities.get("surroundings")?.value,
+    humidity: quantities.get("humidity")?.value,
+    dewPoint: quantities.get("dewPoint")?.value,
     numbers,
     words,
     texts,
@@ -218,7 +236,10 @@ function takeWord(definition: SettingDefinition, value: unknown): string | Probl
   const text = String(value).replace(/\s+/g, " ").trim().toLowerCase();
   const found = definition.words?.find((word) => word.toLowerCase() === text);
   if (found !== undefined) return found;
-  return valueProblem(definition.name, `${quoted(value)} is not known; write ${(definition.words ?? []).map((word) => `"${word}"`).join(" or ")}.`);
+  return valueProblem(
+    definition.name,
+    `${quoted(value)} is not known; write ${(definition.words ?? []).map((word) => `"${word}"`).join(" or ")}.`,
+  );
 }
 
 function takeQuantity(
@@ -256,7 +277,10 @@ function withinLimits(definition: SettingDefinition, quantity: Quantity): Quanti
   if (sign === "positive" && !(value > 0)) return valueProblem(definition.name, `${given} is not above zero.`);
   if (sign === "not negative" && value < 0) return valueProblem(definition.name, `${given} is below zero.`);
   if ((low !== undefined && value < low) || (high !== undefined && value > high)) {
-    return valueProblem(definition.name, `${given} is outside ${formatNumber(low ?? Number.NEGATIVE_INFINITY)} to ${formatNumber(high ?? Number.POSITIVE_INFINITY)}.`);
+    return valueProblem(
+      definition.name,
+      `${given} is outside ${formatNumber(low ?? Number.NEGATIVE_INFINITY)} to ${formatNumber(high ?? Number.POSITIVE_INFINITY)}.`,
+    );
   }
   return quantity;
 }

@@ -11,8 +11,9 @@ import type { Arguments } from "./answer.js";
 import { cellAt, type Cases, isBlank, isBlankOrZero, isSingle, keyOfName, shapeOf } from "./cases.js";
 import { type CellBlock, CellError, type CellValue, isErrorCell, quoted } from "./cell.js";
 import { fluidWord, fluidWords } from "./fluid-function.js";
-import { fluidByName, isOwnTable, readCell, readFluid } from "./inputs.js";
+import { isOwnTable, readCell, readFluid } from "./inputs.js";
 import { layOut, problemCells, problemsEverywhere, unanswered } from "./layout.js";
+import { namedFluid } from "./make-up.js";
 import { errorOf, render } from "./render.js";
 import { isWanted, readRequest, type Request } from "./request.js";
 import { readSettings, type Settled, settle } from "./settings.js";
@@ -48,7 +49,8 @@ const fluidDefinition: Definition = {
   arguments: [{ key: "temperature", name: "temperature", dimensions: ["temperature"], sign: "any", describe: "of the fluid, °C" }],
   words: fluidWords,
   otherwise: "all",
-  answer: (word, one) => fluidWord(word, one.fluid as Fluid, (one.quantities.temperature as Quantity).value, one.settled.pressure, one.remarks),
+  answer: (word, one) =>
+    fluidWord(word, one.fluid as Fluid, (one.quantities.temperature as Quantity).value, one.settled.pressure, one.remarks),
 };
 
 export function answerFluid(args: Arguments, give: CellBlock | null | undefined, settings: CellBlock | null | undefined): CellValue[][] {
@@ -94,10 +96,22 @@ function answerDefinition(
   return answerCases(definition, request as Request, cases, read);
 }
 
-function answerCases(definition: Definition, request: Request, cases: Cases, read: (row: number, column: number) => ReadState): CellValue[][] {
+function answerCases(
+  definition: Definition,
+  request: Request,
+  cases: Cases,
+  read: (row: number, column: number) => ReadState,
+): CellValue[][] {
   if (request.wanted.some((one) => isWanted(one) && one.word.kind === "block")) {
     if (cases.rows > 1 || cases.columns > 1) {
-      return [[new CellError("#VALUE!", `give: "all" spills a block and takes one case, but the cases are ${cases.rows} × ${cases.columns}; name the words wanted.`)]];
+      return [
+        [
+          new CellError(
+            "#VALUE!",
+            `give: "all" spills a block and takes one case, but the cases are ${cases.rows} × ${cases.columns}; name the words wanted.`,
+          ),
+        ],
+      ];
     }
     if (request.wanted.length > 1) return [[new CellError("#VALUE!", 'give: "all" spills a block of its own; ask for it alone.')]];
     return wholeBlock(definition, read(0, 0));
@@ -152,7 +166,7 @@ function readState(
   const remarks: string[] = [];
   let fluid: Fluid | undefined;
   if (definition.takesFluid) {
-    const found = table ? readFluid((filled[0] as { block: CellBlock }).block, settled.reading) : fluidByName(cells[0]);
+    const found = table ? readFluid((filled[0] as { block: CellBlock }).block, settled.reading) : namedFluid(cells[0], settled);
     if (Array.isArray(found)) problems.push(...(found as readonly Problem[]));
     else if (isProblem(found)) problems.push(found);
     else fluid = found as Fluid;
@@ -163,7 +177,8 @@ function readState(
     if (argument.dimensions[0] === "temperature" && isBlankOrZero(cell)) remarks.push(`${argument.name}: ${zeroTaken}`);
     const quantity = readCell(isBlank(cell) ? 0 : cell, argument.dimensions, argument.name, settled);
     if (isProblem(quantity)) problems.push(quantity);
-    else if (argument.sign !== "any" && quantity.value < 0) problems.push(valueProblem(argument.name, `${quoted(quantity.given)} is below zero; ${argument.describe}.`));
+    else if (argument.sign !== "any" && quantity.value < 0)
+      problems.push(valueProblem(argument.name, `${quoted(quantity.given)} is below zero; ${argument.describe}.`));
     else quantities[argument.key] = quantity;
   });
   return problems.length > 0 ? { kind: "problems", problems } : { kind: "case", one: { fluid, quantities, settled, remarks } };
@@ -175,14 +190,17 @@ export function answerUnit(args: Arguments): CellValue[][] {
   const cases = shapeOf(blocks);
   if (isProblem(cases)) return [[errorOf(cases)]];
   const request: Request = { wanted: [{ word: valueWord }], rows: 1, columns: 1 };
-  return layOut(request, cases, (row, column) => [convertCell(...(blocks.map(([, block]) => cellAt(block, row, column)) as [unknown, unknown, unknown]))]);
+  return layOut(request, cases, (row, column) => [
+    convertCell(...(blocks.map(([, block]) => cellAt(block, row, column)) as [unknown, unknown, unknown])),
+  ]);
 }
 
 function convertCell(value: unknown, from: unknown, to: unknown): CellValue {
   const error = [value, from, to].find(isErrorCell);
   if (error !== undefined) return new CellError(error.code as CellError["code"], error.message ?? "");
   if (isBlank(value)) return "";
-  if (typeof value !== "number" && typeof value !== "string") return errorOf(valueProblem("value", `${quoted(value)} is not a quantity; write a number, or text with its unit.`));
+  if (typeof value !== "number" && typeof value !== "string")
+    return errorOf(valueProblem("value", `${quoted(value)} is not a quantity; write a number, or text with its unit.`));
   if (isBlankOrZero(to)) return errorOf(valueProblem("to", 'is empty; write the unit wanted, such as "W/(m²·K)".'));
   const found = convert(value, isBlankOrZero(from) ? "" : String(from), String(to));
   if (isProblem(found)) return errorOf(found);

@@ -27,10 +27,28 @@ export interface StateFunction {
   value(one: StateCase): WordValue;
 }
 
-const temperature = (key: string, describe: string): ArgumentDefinition => ({ key, name: key, dimensions: ["temperature"], sign: "any", describe });
-const length = (key = "length", name = key): ArgumentDefinition => ({ key, name, dimensions: ["length"], sign: "positive", describe: "a length, m" });
+const temperature = (key: string, describe: string): ArgumentDefinition => ({
+  key,
+  name: key,
+  dimensions: ["temperature"],
+  sign: "any",
+  describe,
+});
+const length = (key = "length", name = key): ArgumentDefinition => ({
+  key,
+  name,
+  dimensions: ["length"],
+  sign: "positive",
+  describe: "a length, m",
+});
 const speed: ArgumentDefinition = { key: "speed", name: "speed", dimensions: ["speed"], sign: "not negative", describe: "a speed, m/s" };
-const coefficient: ArgumentDefinition = { key: "h", name: "h", dimensions: ["film coefficient"], sign: "not negative", describe: "a film coefficient, W/(m²·K)" };
+const coefficient: ArgumentDefinition = {
+  key: "h",
+  name: "h",
+  dimensions: ["film coefficient"],
+  sign: "not negative",
+  describe: "a film coefficient, W/(m²·K)",
+};
 
 export const stateFunctions: readonly StateFunction[] = [
   {
@@ -38,7 +56,8 @@ export const stateFunctions: readonly StateFunction[] = [
     title: "Reynolds number",
     takesFluid: true,
     arguments: [temperature("temperature", "of the fluid, °C"), speed, length()],
-    value: (one) => group("Re", one, { Ts: at(one, "temperature"), Tb: at(one, "temperature"), flow: at(one, "speed"), L: at(one, "length") }),
+    value: (one) =>
+      group("Re", one, { Ts: at(one, "temperature"), Tb: at(one, "temperature"), flow: at(one, "speed"), L: at(one, "length") }),
   },
   {
     id: "PRANDTL",
@@ -65,21 +84,34 @@ export const stateFunctions: readonly StateFunction[] = [
     id: "RICHARDSON",
     title: "Richardson number, Gr/Re²",
     takesFluid: true,
-    arguments: [temperature("surface", "of the surface, °C"), temperature("bulk", "of the fluid, °C"), { ...speed, sign: "positive" }, length()],
+    arguments: [
+      temperature("surface", "of the surface, °C"),
+      temperature("bulk", "of the fluid, °C"),
+      { ...speed, sign: "positive" },
+      length(),
+    ],
     value: (one) => group("Ri", one, { ...between(one), flow: at(one, "speed") }),
   },
   {
     id: "NUSSELT",
     title: "Nusselt number, h·L/k of the fluid",
     takesFluid: false,
-    arguments: [coefficient, length(), { key: "k", name: "conductivity", dimensions: ["conductivity"], sign: "positive", describe: "of the fluid, W/(m·K)" }],
+    arguments: [
+      coefficient,
+      length(),
+      { key: "k", name: "conductivity", dimensions: ["conductivity"], sign: "positive", describe: "of the fluid, W/(m·K)" },
+    ],
     value: (one) => algebra("h*L/k", { h: at(one, "h"), L: at(one, "length"), k: at(one, "k") }, "none"),
   },
   {
     id: "BIOT",
     title: "Biot number, h·L/k of the solid",
     takesFluid: false,
-    arguments: [coefficient, length(), { key: "k", name: "solid conductivity", dimensions: ["conductivity"], sign: "positive", describe: "of the solid, W/(m·K)" }],
+    arguments: [
+      coefficient,
+      length(),
+      { key: "k", name: "solid conductivity", dimensions: ["conductivity"], sign: "positive", describe: "of the solid, W/(m·K)" },
+    ],
     value: (one) => algebra("h*L/k", { h: at(one, "h"), L: at(one, "length"), k: at(one, "k") }, "none"),
   },
   {
@@ -115,7 +147,9 @@ function run(program: Program, name: string, inputs: Readonly<Record<string, num
   for (const symbol of program.inputs) values[program.slot(symbol)] = inputs[symbol] ?? Number.NaN;
   program.run(values);
   const value = values[program.slot(name)] as number;
-  return Number.isFinite(value) ? { value, dimension } : coverageProblem(undefined, "these inputs give no number: a divisor is zero or a property is missing.");
+  return Number.isFinite(value)
+    ? { value, dimension }
+    : coverageProblem(undefined, "these inputs give no number: a divisor is zero or a property is missing.");
 }
 
 /** The same group lines that every surface runs, with the properties at the film (or the one) temperature. */
@@ -123,7 +157,8 @@ function group(name: string, one: StateCase, inputs: Record<string, number>): Wo
   const fluid = one.fluid as Fluid;
   const Tf = ((inputs.Ts as number) + (inputs.Tb as number)) / 2;
   const state = fluid.state(Tf, one.settled.pressure);
-  if (isProblem(state)) return state.argument === undefined ? { ...state, argument: inputs.Ts === inputs.Tb ? "temperature" : "film" } : state;
+  if (isProblem(state))
+    return state.argument === undefined ? { ...state, argument: inputs.Ts === inputs.Tb ? "temperature" : "film" } : state;
   const densities = densitiesFor(name, one, inputs, state);
   const variant = densities === undefined ? "expansivity" : "densities";
   const program = groupProgram(name, variant);

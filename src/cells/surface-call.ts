@@ -144,7 +144,14 @@ function answerCase(call: SurfaceCall, row: number, column: number): CellValue[]
 function answerBlock(call: SurfaceCall, wanted: Wanted): CellValue[][] {
   const { cases, request } = call;
   if (cases.rows > 1 || cases.columns > 1) {
-    return [[new CellError("#VALUE!", `give: ${wanted.word.name} spills a block and takes one case, but the cases are ${cases.rows} × ${cases.columns}.`)]];
+    return [
+      [
+        new CellError(
+          "#VALUE!",
+          `give: ${wanted.word.name} spills a block and takes one case, but the cases are ${cases.rows} × ${cases.columns}.`,
+        ),
+      ],
+    ];
   }
   if (request.wanted.length > 1) {
     return [[new CellError("#VALUE!", `give: ${wanted.word.name} spills a block of its own; ask for it alone.`)]];

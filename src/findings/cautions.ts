@@ -26,7 +26,9 @@ export function cautionsAt(point: Point): readonly string[] {
     );
   }
   if (point.surface.motion === "free" && point.scene.spansDensityExtreme()) {
-    list.push(`The density of ${fluid.name} has an extreme between surface and bulk: the flow may split, and the bounds are widened for it.`);
+    list.push(
+      `The density of ${fluid.name} has an extreme between surface and bulk: the flow may split, and the bounds are widened for it.`,
+    );
   }
   if (point.Ts >= longContactBurn) {
     list.push(
@@ -35,9 +37,17 @@ export function cautionsAt(point: Point): readonly string[] {
         : "A touchable surface above about 43 °C burns skin in long contact (ISO 13732-1, from memory).",
     );
   }
+  const dew = fluid.dewPoint?.(inputs.Tb, pressure);
+  if (typeof dew === "number" && point.Ts < dew) {
+    list.push(
+      `The surface is below the dew point (${formatQuantity(dew, "temperature", "SI")}): water condenses on it, and the latent heat is not in h.`,
+    );
+  }
   const Tsat = bulk.phase === "liquid" ? saturationTemperature(fluid, pressure) : undefined;
   if (Tsat !== undefined && point.Ts > Tsat - nearBoiling) {
-    list.push(`The surface is within ${nearBoiling} K of boiling (${formatQuantity(Tsat, "temperature", "SI")}): subcooled boiling may raise h.`);
+    list.push(
+      `The surface is within ${nearBoiling} K of boiling (${formatQuantity(Tsat, "temperature", "SI")}): subcooled boiling may raise h.`,
+    );
   }
   if (bulk.phase === "liquid" && fluid.freezingPoint !== undefined && Math.min(point.Ts, inputs.Tb) < fluid.freezingPoint + 2) {
     list.push(`Surface or bulk is within 2 K of freezing (${formatQuantity(fluid.freezingPoint, "temperature", "SI")}).`);
@@ -47,7 +57,9 @@ export function cautionsAt(point: Point): readonly string[] {
   }
   const speed = valueAt(point, "u");
   if (bulk.speedOfSound !== undefined && speed > compressible * bulk.speedOfSound) {
-    list.push(`Mach ${(speed / bulk.speedOfSound).toFixed(2)} is above 0.3: the driving temperature is the adiabatic wall's, which this value does not use.`);
+    list.push(
+      `Mach ${(speed / bulk.speedOfSound).toFixed(2)} is above 0.3: the driving temperature is the adiabatic wall's, which this value does not use.`,
+    );
   }
   if (pressure > pressurised) list.push("Pressurised fluid: pressure-equipment codes apply.");
   if (point.surface.takesRoughness !== true && (inputs.numbers.sandRoughness ?? inputs.numbers.profileRoughness ?? 0) > 0) {

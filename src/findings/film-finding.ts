@@ -234,6 +234,9 @@ class FilmFinding implements Finding {
   private symbolWord(name: string): WordValue {
     const known = symbolWords[name] ?? this.surface.words?.[name];
     if (known === undefined) return valueProblem("give", `FILM.${this.functionId} has no ${name}.`);
+    if (this.inputs.fluid.densityAssumed === true && needsDensity.has(name)) {
+      return coverageProblem("fluid", `${name} is not given: the property table has no density.`);
+    }
     const value = valueAt(this.solution.point, known.symbol);
     if (Number.isFinite(value)) return { value, dimension: known.dimension };
     return coverageProblem(undefined, `${name} is not judged: these inputs and this fluid do not give it.`);
@@ -255,20 +258,23 @@ class FilmFinding implements Finding {
   private radiating(then: (hRadiant: number) => WordValue): WordValue {
     const { hRadiant } = this.solution.point;
     return hRadiant === undefined
-      ? valueProblem("settings", "radiation needs both emissivity and surroundings, such as \"emissivity=0.9; surroundings=20\".")
+      ? valueProblem("settings", 'radiation needs both emissivity and surroundings, such as "emissivity=0.9; surroundings=20".')
       : then(hRadiant);
   }
 
   private overArea(then: (area: number) => WordValue): WordValue {
     const area = this.inputs.area ?? valueAt(this.solution.point, "wettedArea");
-    return Number.isFinite(area) ? then(area) : valueProblem("area", 'the dimensions do not give the area; add the setting area, such as "area=0.5 m2".');
+    return Number.isFinite(area)
+      ? then(area)
+      : valueProblem("area", 'the dimensions do not give the area; add the setting area, such as "area=0.5 m2".');
   }
 
   private hottest(): WordValue {
     const { point } = this.solution;
     if (this.inputs.wall.kind === "temperature") return { value: point.Ts, dimension: "temperature" };
     const factor = this.surface.peak?.(point.at, (symbol) => valueAt(point, symbol));
-    if (factor === undefined) return coverageProblem("Ts max", "no published equation gives the largest temperature of this surface under a uniform flux.");
+    if (factor === undefined)
+      return coverageProblem("Ts max", "no published equation gives the largest temperature of this surface under a uniform flux.");
     return { value: point.Tref + factor * (point.Ts - point.Tref), dimension: "temperature" };
   }
 
@@ -370,6 +376,9 @@ class FilmFinding implements Finding {
 function noConcern(word: string): Problem {
   return valueProblem("concern", `${word} needs the setting concern: "too hot" or "too cold", whichever must not happen to the part.`);
 }
+
+/** Figures that mean nothing where a table without density had 1 kg/m³ put in its place. */
+const needsDensity = new Set(["density", "cp", "viscosity", "pressure drop"]);
 
 /** Words that are a symbol of every program. */
 export const symbolWords: Readonly<Record<string, { readonly symbol: string; readonly dimension: Dimension }>> = {

@@ -71,8 +71,6 @@ function origin(feed: Feed, inputs: Inputs, solution: Solution): { kind: Step["k
     case "gravity":
     case "pressure":
       return { kind: "setting", ...tolerance(inputs, feed.from) };
-    case "is flux":
-      return { kind: "input", note: "1 where the surface is given by its flux" };
     case "flux":
       return { kind: "input", ...tolerance(inputs, "surface") };
     default:

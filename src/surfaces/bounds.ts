@@ -233,9 +233,7 @@ function buoyancyShare(point: Point, nominal: Outcome): Share[] {
   const runner = runnerOf(point.surface, point.runner.record, { ...variant, buoyancy: "expansivity" });
   const other = evaluateWith(point.surface, point.scene, point.at, runner, false);
   if (isProblem(other)) return [];
-  return [
-    shareOf("buoyancy by expansivity instead of by densities", "common practice", nominal, [scaled(point, other.h / point.h)]),
-  ];
+  return [shareOf("buoyancy by expansivity instead of by densities", "common practice", nominal, [scaled(point, other.h / point.h)])];
 }
 
 /** Across a density extreme the layer may split into streams up and down: no equation holds closer than by half. */

@@ -74,7 +74,8 @@ function named(wanted: string, all: readonly Correlation[]): readonly Correlatio
   const ownWords = (record: Correlation): readonly string[] =>
     wordsOf(`${record.name} ${record.source.work} ${record.id} ${record.set ?? ""}`);
   const whole = all.filter((record) => words.every((word) => ownWords(record).includes(word)));
-  const found = whole.length > 0 ? whole : all.filter((record) => words.every((word) => ownWords(record).some((one) => one.startsWith(word))));
+  const found =
+    whole.length > 0 ? whole : all.filter((record) => words.every((word) => ownWords(record).some((one) => one.startsWith(word))));
   const list = (records: readonly Correlation[]): string => records.map((record) => `"${labelOf(record)}"`).join(", ");
   if (found.length === 0) {
     return valueProblem("equation", `"${wanted}" names no equation that serves here; there are ${list(all)}.`);

@@ -42,7 +42,9 @@ function completed(record: Correlation, phase: Circumstances["phase"], rough: bo
       lines: { Nu: rough ? "Nu_constant*Factor_ratio*Factor_gain" : "Nu_constant*Factor_ratio" },
       ranges: { ...rangesOf(record), ...ratio.ranges, ...(rough ? { e_D: [0, roughest] as const } : {}) },
       scatter: rough ? roughScatter(record) : record.scatter,
-      note: [record.note, `Property ratio: ${ratio.note ?? ratio.name}`, rough ? `Roughness: ${gain.note ?? gain.name}` : ""].filter(Boolean).join(" "),
+      note: [record.note, `Property ratio: ${ratio.note ?? ratio.name}`, rough ? `Roughness: ${gain.note ?? gain.name}` : ""]
+        .filter(Boolean)
+        .join(" "),
     };
     corrected.set(id, made);
   }
@@ -51,7 +53,9 @@ function completed(record: Correlation, phase: Circumstances["phase"], rough: bo
 
 /** Ranges of a part's own helper lines go by the name the line has inside the whole. */
 function rangesOf(record: Correlation): Record<string, readonly [number, number]> {
-  return Object.fromEntries(Object.entries(record.ranges).map(([symbol, range]) => [symbol in record.lines ? `${symbol}_constant` : symbol, range]));
+  return Object.fromEntries(
+    Object.entries(record.ranges).map(([symbol, range]) => [symbol in record.lines ? `${symbol}_constant` : symbol, range]),
+  );
 }
 
 function roughScatter(record: Correlation): Correlation["scatter"] {
@@ -118,9 +122,7 @@ function groups({ given, local }: Variant): Record<string, string> {
     D_L: long ? `diameter/${along}` : "0",
     ...(long ? { L_D: `${along}/diameter`, x_D: `${along}/diameter`, xs: `${along}/(diameter*Re*Pr)`, xp: `${along}/(diameter*Re)` } : {}),
     e_D: roughness(given),
-    ...(given.has("length")
-      ? { wettedArea: "PI()*diameter*length", pressureDrop: "frictionFactor*length/diameter*rho_b*u^2/2" }
-      : {}),
+    ...(given.has("length") ? { wettedArea: "PI()*diameter*length", pressureDrop: "frictionFactor*length/diameter*rho_b*u^2/2" } : {}),
   };
 }
 
@@ -134,14 +136,28 @@ function roughness(given: ReadonlySet<string>): string {
 export const ductTube: Surface = {
   id: "DUCT.TUBE",
   title: "Inside a circular tube",
-  describe: "Film coefficient inside a circular tube: mean from the inlet over the length, local at a position, or developed without a length.",
+  describe:
+    "Film coefficient inside a circular tube: mean from the inlet over the length, local at a position, or developed without a length.",
   motion: "duct",
   wallName: "wall",
   reference: "the fluid's bulk temperature, mean over the length (local with position)",
   arguments: [
-    { key: "flow", name: "flow", dimensions: ["speed", "mass flow", "volume flow"], sign: "not negative", describe: "mean speed, m/s, or a mass or volume flow as text" },
+    {
+      key: "flow",
+      name: "flow",
+      dimensions: ["speed", "mass flow", "volume flow"],
+      sign: "not negative",
+      describe: "mean speed, m/s, or a mass or volume flow as text",
+    },
     { key: "diameter", name: "diameter", dimensions: ["length"], sign: "positive", describe: "inside diameter, m" },
-    { key: "length", name: "length", dimensions: ["length"], sign: "positive", describe: "heated length from the inlet, m", optional: true },
+    {
+      key: "length",
+      name: "length",
+      dimensions: ["length"],
+      sign: "positive",
+      describe: "heated length from the inlet, m",
+      optional: true,
+    },
   ],
   settings: [],
   takesRoughness: true,
@@ -158,7 +174,9 @@ export const ductTube: Surface = {
     return Re < turbulentFrom ? "transition" : "turbulent";
   },
   cautions: (_, value) =>
-    value("Pr") < metalBelow ? ["Liquid metal: only equations made for liquid metals may be taken, never the ordinary turbulent ones."] : [],
+    value("Pr") < metalBelow
+      ? ["Liquid metal: only equations made for liquid metals may be taken, never the ordinary turbulent ones."]
+      : [],
   words: {
     "friction factor": { symbol: "frictionFactor", dimension: "none", describe: "Darcy friction factor" },
     "pressure drop": { symbol: "pressureDrop", dimension: "pressure", describe: "friction over the length" },

@@ -62,7 +62,9 @@ function candidates(at: Circumstances): readonly Correlation[] {
 }
 
 function rivals(at: Circumstances, value: Values, chosen: Correlation): readonly Rival[] {
-  const free = at.local ? [] : mixedRivals(value("Ri"), chosen, correlationById("raithby-hollands-1998-plate"), correlationById("churchill-1977-plate-horizontal"));
+  const free = at.local
+    ? []
+    : mixedRivals(value("Ri"), chosen, correlationById("raithby-hollands-1998-plate"), correlationById("churchill-1977-plate-horizontal"));
   const Re = value("Re");
   const open = at.inputs.words.boundaryLayer === undefined && !at.local && Re > transition && Re < settled;
   if (!open) return free;
@@ -90,8 +92,21 @@ export const forcedPlate: Surface = {
     { key: "length", name: "length", dimensions: ["length"], sign: "positive", describe: "length along the flow, m" },
   ],
   settings: [
-    { name: "boundary layer", key: "boundaryLayer", kind: "word", words: ["natural", "tripped"], describe: "whether the layer is laminar at first or tripped at the leading edge" },
-    { name: "unheated length", key: "unheatedLength", kind: "quantity", dimensions: ["length"], sign: "positive", describe: "from the leading edge to where heating begins" },
+    {
+      name: "boundary layer",
+      key: "boundaryLayer",
+      kind: "word",
+      words: ["natural", "tripped"],
+      describe: "whether the layer is laminar at first or tripped at the leading edge",
+    },
+    {
+      name: "unheated length",
+      key: "unheatedLength",
+      kind: "quantity",
+      dimensions: ["length"],
+      sign: "positive",
+      describe: "from the leading edge to where heating begins",
+    },
   ],
   groups: ({ local, given }) => ({
     L: local ? "position" : "length",
@@ -103,7 +118,8 @@ export const forcedPlate: Surface = {
   }),
   candidates,
   prefers: [...laminarFirst, ...turbulentFirst],
-  preference: "Pohlhausen while laminar (Churchill & Ozoe beyond ordinary Pr), then laminar and turbulent parts in one line, transition at Re 5e5",
+  preference:
+    "Pohlhausen while laminar (Churchill & Ozoe beyond ordinary Pr), then laminar and turbulent parts in one line, transition at Re 5e5",
   rivals,
   regime: (at, value) => {
     const Re = value("Re");
@@ -112,7 +128,8 @@ export const forcedPlate: Surface = {
     return at.local ? "turbulent" : "laminar, then turbulent";
   },
   // Similarity: the difference grows with x^(1/2) while laminar, with x^(1/5) in a turbulent layer; between them the place of transition decides.
-  peak: (at, value) => (at.local ? undefined : at.inputs.words.boundaryLayer === "tripped" ? 1.2 : value("Re") <= transition ? 1.5 : undefined),
+  peak: (at, value) =>
+    at.local ? undefined : at.inputs.words.boundaryLayer === "tripped" ? 1.2 : value("Re") <= transition ? 1.5 : undefined,
 };
 
 function roughnessLines(given: ReadonlySet<string>): Record<string, string> {

@@ -41,9 +41,19 @@ export const freePlate: Surface = {
   motion: "free",
   wallName: "surface",
   reference: "the bulk temperature far from the plate",
-  arguments: [{ key: "height", name: "height", dimensions: ["length"], sign: "positive", describe: "height of the plate along its slope, m" }],
+  arguments: [
+    { key: "height", name: "height", dimensions: ["length"], sign: "positive", describe: "height of the plate along its slope, m" },
+  ],
   settings: [
-    { name: "tilt", key: "slope", kind: "quantity", dimensions: ["angle"], low: -90, high: 90, describe: "degrees from vertical, positive when the wetted face looks up" },
+    {
+      name: "tilt",
+      key: "slope",
+      kind: "quantity",
+      dimensions: ["angle"],
+      low: -90,
+      high: 90,
+      describe: "degrees from vertical, positive when the wetted face looks up",
+    },
   ],
   groups: ({ local, given }) => ({ L: local ? "position" : "height", ...(given.has("slope") ? { tilt: "ABS(slope)" } : {}) }),
   candidates,

@@ -2,7 +2,7 @@ import type { Correlation } from "../correlations/correlation.js";
 import type { State } from "../fluids/fluid.js";
 import { coverageProblem, isProblem, type Problem } from "../quantities/problems.js";
 import { type Runner, runnerOf } from "./runner.js";
-import { Scene } from "./scene.js";
+import type { Scene } from "./scene.js";
 import type { Circumstances, Inputs, Surface, Variant } from "./surface.js";
 
 /** Stefan–Boltzmann constant, W/(m²·K⁴): exact by the 2019 SI, 2·π⁵·k⁴/(15·h³·c²). */
@@ -147,7 +147,8 @@ function writeResult(runner: Runner, values: Float64Array, Nu: number, Ts: numbe
 function noNumber(runner: Runner, values: Float64Array): Problem {
   for (const range of runner.ranges) {
     const value = values[range.slot] as number;
-    if (!Number.isFinite(value)) return coverageProblem(undefined, `${runner.record.name} needs ${range.symbol}, which these inputs do not give.`);
+    if (!Number.isFinite(value))
+      return coverageProblem(undefined, `${runner.record.name} needs ${range.symbol}, which these inputs do not give.`);
   }
   return coverageProblem(undefined, `${runner.record.name} gives no number here: its algebra leaves the real numbers outside its range.`);
 }
@@ -196,9 +197,6 @@ function fill(scene: Scene, runner: Runner, values: Float64Array, nudge: Nudge |
         break;
       case "flux":
         value = inputs.wall.kind === "flux" ? inputs.wall.q : Number.NaN;
-        break;
-      case "is flux":
-        value = inputs.wall.kind === "flux" ? 1 : 0;
         break;
       default:
         value = inputs.numbers[feed.key];

@@ -13,8 +13,12 @@ export interface NamedLine {
 
 /** Where an input symbol of a program takes its number from. */
 export type Feed =
-  | { readonly slot: number; readonly from: "property" | "bulk" | "wall"; readonly property: "density" | "cp" | "conductivity" | "viscosity" | "expansivity" }
-  | { readonly slot: number; readonly from: "Ts" | "Tb" | "gravity" | "pressure" | "flux" | "is flux" }
+  | {
+      readonly slot: number;
+      readonly from: "property" | "bulk" | "wall";
+      readonly property: "density" | "cp" | "conductivity" | "viscosity" | "expansivity";
+    }
+  | { readonly slot: number; readonly from: "Ts" | "Tb" | "gravity" | "pressure" | "flux" }
   | { readonly slot: number; readonly from: "number"; readonly key: string };
 
 export interface RangeLine {
@@ -151,7 +155,6 @@ function build(surface: Surface, record: Correlation, variant: Variant): Runner 
 function feedOf(symbol: string, slot: number): Feed {
   if (symbol === "Ts" || symbol === "Tb" || symbol === "gravity" || symbol === "pressure") return { slot, from: symbol };
   if (symbol === "q_wall") return { slot, from: "flux" };
-  if (symbol === "flux") return { slot, from: "is flux" };
   const [base, suffix] = symbol.split("_");
   const property = base !== undefined && base in properties ? properties[base as keyof typeof properties] : undefined;
   if (property !== undefined && suffix === undefined) return { slot, from: "property", property };

@@ -30,8 +30,22 @@ describe("the same case in other words", () => {
 
   test("settings as text, as two columns and as a table with one row say the same", () => {
     const text = numberOf(one("FREE.PLATE", plate, "h", "pressure=2 bar; gravity=5"));
-    expect(numberOf(one("FREE.PLATE", plate, "h", [["pressure", "2 bar"], ["gravity", 5]]))).toBe(text);
-    expect(numberOf(one("FREE.PLATE", plate, "h", [["pressure", "gravity"], ["2 bar", 5]]))).toBe(text);
+    expect(
+      numberOf(
+        one("FREE.PLATE", plate, "h", [
+          ["pressure", "2 bar"],
+          ["gravity", 5],
+        ]),
+      ),
+    ).toBe(text);
+    expect(
+      numberOf(
+        one("FREE.PLATE", plate, "h", [
+          ["pressure", "gravity"],
+          ["2 bar", 5],
+        ]),
+      ),
+    ).toBe(text);
     expect(text).not.toBeCloseTo(h, 2);
   });
 
@@ -63,17 +77,24 @@ describe("shapes", () => {
     const cells = film("FREE.PLATE", ["air", column(60, 80), 20, row(0.2, 0.3, 0.4)]);
     expect(cells.map((line) => line.length)).toEqual([3, 3]);
     expect(cells[1]?.[1]).toBe(h);
-    expect(sentence(one("FREE.PLATE", ["air", column(60, 80), 20, row(0.2, 0.3)], row("h", "Ra")))).toMatch(/^#VALUE! give: .*grid of 2 × 2/);
+    expect(sentence(one("FREE.PLATE", ["air", column(60, 80), 20, row(0.2, 0.3)], row("h", "Ra")))).toMatch(
+      /^#VALUE! give: .*grid of 2 × 2/,
+    );
   });
 
   test("shapes that do not fit are an error that states both", () => {
-    expect(sentence(one("FREE.PLATE", ["air", column(60, 80), column(20, 20, 20), 0.3]))).toMatch(/^#VALUE! bulk: has 3 rows, but surface has 2/);
+    expect(sentence(one("FREE.PLATE", ["air", column(60, 80), column(20, 20, 20), 0.3]))).toMatch(
+      /^#VALUE! bulk: has 3 rows, but surface has 2/,
+    );
   });
 
   test("names of fluids broadcast, and an own table does not", () => {
     const cells = film("FREE.PLATE", [column("air", "water"), 40, 20, 0.3]);
     expect(numberOf(cells[1]?.[0] as number)).toBeGreaterThan(10 * numberOf(cells[0]?.[0] as number));
-    const own = [["temperature", "density", "cp", "conductivity", "viscosity", "expansivity"], [50, 1.1, 1007, 0.028, 1.95e-5, 0.0031]];
+    const own = [
+      ["temperature", "density", "cp", "conductivity", "viscosity", "expansivity"],
+      [50, 1.1, 1007, 0.028, 1.95e-5, 0.0031],
+    ];
     expect(film("FREE.PLATE", [own, column(60, 80), 20, 0.3])).toHaveLength(2);
   });
 
@@ -153,8 +174,15 @@ describe("refusals are sentences", () => {
 
 describe("what h means", () => {
   test("q is h times surface minus reference, negative when the surface is the colder", () => {
-    for (const [hot, cold] of [[80, 20], [5, 40]] as const) {
-      const [[value, q, reference] = []] = film("FREE.PLATE", ["air", hot, cold, 0.3], row("h", "q", "reference temperature")) as number[][];
+    for (const [hot, cold] of [
+      [80, 20],
+      [5, 40],
+    ] as const) {
+      const [[value, q, reference] = []] = film(
+        "FREE.PLATE",
+        ["air", hot, cold, 0.3],
+        row("h", "q", "reference temperature"),
+      ) as number[][];
       expect((q as number) / ((value as number) * (hot - (reference as number)))).toBeCloseTo(1, 12);
     }
   });
@@ -167,7 +195,11 @@ describe("what h means", () => {
 
   test("a flux finds the temperature that carries it", () => {
     for (const id of ["FREE.PLATE", "FREE.CYLINDER"]) {
-      const [[Ts, q, value, Tref] = []] = film(id, ["air", "500 W/m2", 20, 0.3], row("Ts", "q", "h", "reference temperature")) as number[][];
+      const [[Ts, q, value, Tref] = []] = film(
+        id,
+        ["air", "500 W/m2", 20, 0.3],
+        row("Ts", "q", "h", "reference temperature"),
+      ) as number[][];
       expect(q).toBeCloseTo(500, 5);
       expect((value as number) * ((Ts as number) - (Tref as number))).toBeCloseTo(500, 5);
     }
@@ -175,14 +207,24 @@ describe("what h means", () => {
   });
 
   test("a flux with radiation splits between both", () => {
-    const [cells = []] = film("FREE.PLATE", ["air", "500 W/m2", 20, 0.3], row("q", "q radiant", "q total", "Ts"), "emissivity=0.9; surroundings=20") as number[][];
+    const [cells = []] = film(
+      "FREE.PLATE",
+      ["air", "500 W/m2", 20, 0.3],
+      row("q", "q radiant", "q total", "Ts"),
+      "emissivity=0.9; surroundings=20",
+    ) as number[][];
     expect(cells[2]).toBeCloseTo(500, 5);
     expect((cells[0] as number) + (cells[1] as number)).toBeCloseTo(500, 5);
     expect(cells[3]).toBeLessThan(numberOf(one("FREE.PLATE", ["air", "500 W/m2", 20, 0.3], "Ts")));
   });
 
   test("h total with surroundings apart from the bulk goes with the equivalent reference", () => {
-    const [cells = []] = film("FREE.PLATE", ["air", 80, 20, 0.3], row("h total", "q total", "reference temperature"), "emissivity=0.9; surroundings=5") as number[][];
+    const [cells = []] = film(
+      "FREE.PLATE",
+      ["air", 80, 20, 0.3],
+      row("h total", "q total", "reference temperature"),
+      "emissivity=0.9; surroundings=5",
+    ) as number[][];
     expect((cells[0] as number) * (80 - (cells[2] as number))).toBeCloseTo(cells[1] as number, 8);
   });
 
@@ -192,7 +234,12 @@ describe("what h means", () => {
     expect(loose[0]).toBe(exact[0]);
     expect(loose[1]).toBeLessThan(exact[1] as number);
     expect(loose[2]).toBeGreaterThan(exact[2] as number);
-    const [worst = []] = film("FREE.PLATE", ["air", "80 ± 20 °C", 20, "0.3 m ± 10 %"], row("h low", "h high"), "bounds=worst") as number[][];
+    const [worst = []] = film(
+      "FREE.PLATE",
+      ["air", "80 ± 20 °C", 20, "0.3 m ± 10 %"],
+      row("h low", "h high"),
+      "bounds=worst",
+    ) as number[][];
     expect(worst[0]).toBeLessThan(loose[1] as number);
     expect(worst[1]).toBeGreaterThan(loose[2] as number);
   });
@@ -229,7 +276,9 @@ describe("blocks", () => {
   });
 
   test("compare holds the equation taken, with the same h", () => {
-    const taken = film("FREE.PLATE", plate, "compare").slice(1).find((line) => line[5] === "taken");
+    const taken = film("FREE.PLATE", plate, "compare")
+      .slice(1)
+      .find((line) => line[5] === "taken");
     expect(taken?.[1]).toBe(h);
   });
 });

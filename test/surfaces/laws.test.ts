@@ -35,7 +35,15 @@ const sweeps: readonly Sweep[] = [0.7, 7, 100].flatMap((Pr): Sweep[] => [
   { id: "FREE.UNDERSIDE", Pr, values: (x) => [still(Pr), 30, 20, x, x], from: 0.1, to: 5 },
   { id: "FORCED.CYLINDER", Pr, values: (x) => [still(Pr), 30, 20, x, 0.01], from: 0.05, to: 5e3 },
   { id: "FORCED.PLATE", Pr, values: (x) => [still(Pr), 30, 20, x, 1], from: 0.02, to: 500 },
-  { id: "FORCED.PLATE", Pr, values: (x) => [still(Pr), 30, 20, x, 1], from: 0.2, to: 500, settings: "boundary layer=tripped", exempt: Pr > 60 ? "below Re 5e5 no equation for a tripped layer serves such a Prandtl number" : undefined },
+  {
+    id: "FORCED.PLATE",
+    Pr,
+    values: (x) => [still(Pr), 30, 20, x, 1],
+    from: 0.2,
+    to: 500,
+    settings: "boundary layer=tripped",
+    exempt: Pr > 60 ? "below Re 5e5 no equation for a tripped layer serves such a Prandtl number" : undefined,
+  },
   { id: "DUCT.TUBE", Pr, values: (x) => [still(Pr), 30, 20, x, 0.01], from: 0.002, to: 900 },
   { id: "DUCT.TUBE", Pr, values: (x) => [still(Pr), 30, 20, x, 0.01, 1], from: 0.002, to: 900 },
   { id: "DUCT.TUBE", Pr, values: (x) => [still(Pr), "50 W/m2", 20, x, 0.01, 1], from: 0.002, to: 900, settings: "position=0.5" },
@@ -65,47 +73,54 @@ function closingIn(sweep: Sweep, from: number, to: number): readonly [below: Row
   return [below, above];
 }
 
-describe.each(sweeps.map((sweep, i) => [`${i + 1} ${sweep.id} Pr ${sweep.Pr} ${sweep.settings ?? ""}`, sweep] as const))("%s", (_, sweep) => {
-  const xs = Array.from({ length: steps + 1 }, (__, i) => sweep.from * (sweep.to / sweep.from) ** (i / steps));
-  const rows = xs.map((x) => film(sweep.id, sweep.values(x), [["h", "h low", "h high", "equation"]], sweep.settings)[0] as (number | string)[]);
-  const good = rows.filter((row) => typeof row[0] === "number");
+describe.each(sweeps.map((sweep, i) => [`${i + 1} ${sweep.id} Pr ${sweep.Pr} ${sweep.settings ?? ""}`, sweep] as const))(
+  "%s",
+  (_, sweep) => {
+    const xs = Array.from({ length: steps + 1 }, (__, i) => sweep.from * (sweep.to / sweep.from) ** (i / steps));
+    const rows = xs.map(
+      (x) => film(sweep.id, sweep.values(x), [["h", "h low", "h high", "equation"]], sweep.settings)[0] as (number | string)[],
+    );
+    const good = rows.filter((row) => typeof row[0] === "number");
 
-  test("gives a number over most of the sweep, always with bounds around it", () => {
-    expect(good.length).toBeGreaterThan((sweep.exempt === undefined ? 0.7 : 0.3) * rows.length);
-    for (const row of good) {
-      expect(row[1]).toBeLessThanOrEqual(row[0] as number);
-      expect(row[2]).toBeGreaterThanOrEqual(row[0] as number);
-    }
-  });
+    test("gives a number over most of the sweep, always with bounds around it", () => {
+      expect(good.length).toBeGreaterThan((sweep.exempt === undefined ? 0.7 : 0.3) * rows.length);
+      for (const row of good) {
+        expect(row[1]).toBeLessThanOrEqual(row[0] as number);
+        expect(row[2]).toBeGreaterThanOrEqual(row[0] as number);
+      }
+    });
 
-  test("has no jump that the bounds do not cover", () => {
-    for (let i = 1; i < rows.length; i++) {
-      const [a, b] = [rows[i - 1] as number[], rows[i] as number[]];
-      if (typeof a[0] !== "number" || typeof b[0] !== "number" || Math.abs(b[0] / a[0] - 1) < 0.02) continue;
-      const [below, above] = closingIn(sweep, xs[i - 1] as number, xs[i] as number);
-      if (Math.abs((above[0] as number) / (below[0] as number) - 1) < 1e-3) continue;
-      const covered = (above[0] as number) <= (below[2] as number) && (above[0] as number) >= (below[1] as number);
-      expect(covered, `${xs[i]}: ${below[0]} then ${above[0]}`).toBe(true);
-    }
-  });
+    test("has no jump that the bounds do not cover", () => {
+      for (let i = 1; i < rows.length; i++) {
+        const [a, b] = [rows[i - 1] as number[], rows[i] as number[]];
+        if (typeof a[0] !== "number" || typeof b[0] !== "number" || Math.abs(b[0] / a[0] - 1) < 0.02) continue;
+        const [below, above] = closingIn(sweep, xs[i - 1] as number, xs[i] as number);
+        if (Math.abs((above[0] as number) / (below[0] as number) - 1) < 1e-3) continue;
+        const covered = (above[0] as number) <= (below[2] as number) && (above[0] as number) >= (below[1] as number);
+        expect(covered, `${xs[i]}: ${below[0]} then ${above[0]}`).toBe(true);
+      }
+    });
 
-  test("the flux rises with flow, length or difference as its equation implies", () => {
-    // q grows with speed; for free convection from a larger body h·L grows. A fall of more than 2 % between neighbours is none.
-    for (let i = 1; i < rows.length; i++) {
-      const [a, b] = [rows[i - 1] as number[], rows[i] as number[]];
-      if (typeof a[0] !== "number" || typeof b[0] !== "number") continue;
-      if ((a as unknown as string[])[3] !== (b as unknown as string[])[3]) continue; // another equation took over: its bounds are judged above
-      const size = sweep.id.startsWith("FREE") && typeof sweep.values(1)[1] === "number" ? (xs[i] as number) / (xs[i - 1] as number) : 1;
-      expect(((b[0] as number) / (a[0] as number)) * size, `${xs[i]}`).toBeGreaterThan(0.98);
-    }
-  });
-});
+    test("the flux rises with flow, length or difference as its equation implies", () => {
+      // q grows with speed; for free convection from a larger body h·L grows. A fall of more than 2 % between neighbours is none.
+      for (let i = 1; i < rows.length; i++) {
+        const [a, b] = [rows[i - 1] as number[], rows[i] as number[]];
+        if (typeof a[0] !== "number" || typeof b[0] !== "number") continue;
+        if ((a as unknown as string[])[3] !== (b as unknown as string[])[3]) continue; // another equation took over: its bounds are judged above
+        const size = sweep.id.startsWith("FREE") && typeof sweep.values(1)[1] === "number" ? (xs[i] as number) / (xs[i - 1] as number) : 1;
+        expect(((b[0] as number) / (a[0] as number)) * size, `${xs[i]}`).toBeGreaterThan(0.98);
+      }
+    });
+  },
+);
 
 describe("every equation is found by its own label", () => {
   const circumstances = (): readonly Circumstances[] => {
     const inputs = { numbers: {}, words: {} } as unknown as Inputs;
     return (["isothermal", "uniform flux"] as const).flatMap((wall) =>
-      [true, false].flatMap((rising) => [true, false].map((local): Circumstances => ({ inputs, Ts: 300, rising, wall, local, phase: "gas" }))),
+      [true, false].flatMap((rising) =>
+        [true, false].map((local): Circumstances => ({ inputs, Ts: 300, rising, wall, local, phase: "gas" })),
+      ),
     );
   };
   test.each(allSurfaces.map((surface) => [surface.id, surface] as const))("%s", (id, surface) => {
