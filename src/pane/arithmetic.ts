@@ -120,7 +120,9 @@ export function textOf(cell: unknown): string {
   if (typeof cell === "boolean") return cell ? "TRUE" : "FALSE";
   if (typeof cell !== "number") return cell === null || cell === undefined ? "" : String(cell);
   const rounded = Number(cell.toPrecision(15));
-  return String(rounded).replace(/e([-+])(\d)$/, "E$10$2").replace("e", "E");
+  return String(rounded)
+    .replace(/e([-+])(\d)$/, "E$10$2")
+    .replace("e", "E");
 }
 
 function compare(operator: Operator, left: unknown, right: unknown): boolean {
@@ -146,7 +148,8 @@ function ordered(left: unknown, right: unknown): number {
   const [one, other] = [filled(left, right), filled(right, left)];
   const rank = (cell: unknown): number => (typeof cell === "number" ? 0 : typeof cell === "string" ? 1 : 2);
   if (rank(one) !== rank(other)) return rank(one) - rank(other);
-  if (typeof one === "string") return one.toLowerCase() === String(other).toLowerCase() ? 0 : one.toLowerCase() < String(other).toLowerCase() ? -1 : 1;
+  if (typeof one === "string")
+    return one.toLowerCase() === String(other).toLowerCase() ? 0 : one.toLowerCase() < String(other).toLowerCase() ? -1 : 1;
   return Number(one) - Number(other);
 }
 

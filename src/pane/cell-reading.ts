@@ -57,7 +57,15 @@ function readCall(call: FilmCall, formula: string, lookUp: LookUp): ReadCall {
   if (signature === undefined) return { ...base, troubles: [words.trouble.unknownFunction(call.name)] };
   const { parameters } = signature;
   if (call.args.length > parameters.length) {
-    return { ...base, troubles: [words.trouble.tooMany(call.args.length, parameters.map((one) => one.name))] };
+    return {
+      ...base,
+      troubles: [
+        words.trouble.tooMany(
+          call.args.length,
+          parameters.map((one) => one.name),
+        ),
+      ],
+    };
   }
   const blocks: Record<string, CellBlock | null> = {};
   const texts: Record<string, string> = {};
@@ -68,7 +76,8 @@ function readCall(call: FilmCall, formula: string, lookUp: LookUp): ReadCall {
     if (expression === undefined) return;
     texts[parameter.name] = formula.slice(expression.start, expression.end);
     const value = evaluate(expression, lookUp);
-    if (isUnresolved(value)) troubles.push(words.trouble.argument(parameter.name, formula.slice(value.unresolved.start, value.unresolved.end)));
+    if (isUnresolved(value))
+      troubles.push(words.trouble.argument(parameter.name, formula.slice(value.unresolved.start, value.unresolved.end)));
     else blocks[parameter.key] = value;
   });
   const { give = null, settings = null, ...args } = blocks;

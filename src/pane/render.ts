@@ -35,7 +35,8 @@ export function show(container: HTMLElement, children: readonly Child[]): void {
     if (details instanceof HTMLDetailsElement) details.open = isOpen;
   }
   container.scrollTop = scrollTop;
-  if (focused !== undefined && focused !== "") (container.querySelector(`#${CSS.escape(focused)}`) as HTMLElement | null)?.focus({ preventScroll: true });
+  if (focused !== undefined && focused !== "")
+    (container.querySelector(`#${CSS.escape(focused)}`) as HTMLElement | null)?.focus({ preventScroll: true });
 }
 
 export type { PageElement };

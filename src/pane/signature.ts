@@ -19,7 +19,12 @@ export interface Signature {
 }
 
 const give: Parameter = { name: "give", key: "give", optional: true, describe: "what comes back: words, or the header row of a table" };
-const settings: Parameter = { name: "settings", key: "settings", optional: true, describe: "names and values, or text such as \"pressure=2 bar\"" };
+const settings: Parameter = {
+  name: "settings",
+  key: "settings",
+  optional: true,
+  describe: 'names and values, or text such as "pressure=2 bar"',
+};
 
 function needed(name: string, describe: string): Parameter {
   return { name, key: keyOfName(name), optional: false, describe };
@@ -27,23 +32,31 @@ function needed(name: string, describe: string): Parameter {
 
 function build(): readonly Signature[] {
   const fluid = needed("fluid", "name of the fluid, or a property table");
-  const surfaces = allSurfaces.map((surface): Signature => ({
-    id: surface.id,
-    title: surface.title,
-    parameters: [
-      fluid,
-      needed(surface.wallName, "temperature, or heat flux as text"),
-      needed("bulk", "bulk temperature"),
-      ...surface.arguments.map((one) => ({ ...needed(one.name, one.describe), optional: one.optional === true })),
-      give,
-      settings,
-    ],
-  }));
-  const states = stateFunctions.map((one): Signature => ({
-    id: one.id,
-    title: one.title,
-    parameters: [...(one.takesFluid ? [fluid] : []), ...one.arguments.map((argument) => needed(argument.name, argument.describe)), settings],
-  }));
+  const surfaces = allSurfaces.map(
+    (surface): Signature => ({
+      id: surface.id,
+      title: surface.title,
+      parameters: [
+        fluid,
+        needed(surface.wallName, "temperature, or heat flux as text"),
+        needed("bulk", "bulk temperature"),
+        ...surface.arguments.map((one) => ({ ...needed(one.name, one.describe), optional: one.optional === true })),
+        give,
+        settings,
+      ],
+    }),
+  );
+  const states = stateFunctions.map(
+    (one): Signature => ({
+      id: one.id,
+      title: one.title,
+      parameters: [
+        ...(one.takesFluid ? [fluid] : []),
+        ...one.arguments.map((argument) => needed(argument.name, argument.describe)),
+        settings,
+      ],
+    }),
+  );
   return [
     ...surfaces,
     { id: "FLUID", title: "Properties of a fluid", parameters: [fluid, needed("temperature", "of the fluid"), give, settings] },
@@ -51,7 +64,11 @@ function build(): readonly Signature[] {
     {
       id: "UNIT",
       title: "A quantity in another unit",
-      parameters: [needed("value", "a number, or text with its unit"), { ...needed("from", "its unit, empty where the text carries it"), optional: true }, needed("to", "the unit wanted")],
+      parameters: [
+        needed("value", "a number, or text with its unit"),
+        { ...needed("from", "its unit, empty where the text carries it"), optional: true },
+        needed("to", "the unit wanted"),
+      ],
     },
     {
       id: "LIST",

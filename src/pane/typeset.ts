@@ -29,7 +29,9 @@ export function typesetSymbol(name: string): PageElement {
 const allowedTags: ReadonlySet<string> = new Set(
   "math mrow mi mn mo mtext msub msup msubsup mfrac msqrt mroot mtable mtr mtd mspace mover munder".split(" "),
 );
-const allowedAttributes: ReadonlySet<string> = new Set("display mathvariant stretchy form lspace rspace columnalign class data-symbol".split(" "));
+const allowedAttributes: ReadonlySet<string> = new Set(
+  "display mathvariant stretchy form lspace rspace columnalign class data-symbol".split(" "),
+);
 const piece = /<(\/?)([a-z]+)((?:\s+[a-z-]+="[^"<]*")*)\s*(\/?)>|([^<]+)/gy;
 
 /** Reads our own presentation MathML into a tree; undefined where it holds anything else. */

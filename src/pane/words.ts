@@ -6,14 +6,22 @@ function list(names: readonly string[]): string {
 
 export const words = {
   title: "Filmbook",
-  pages: { navigation: "Pages of the pane", thisCell: "This cell", newFormula: "New formula", library: "Surfaces and fluids", workbook: "Whole workbook", cautions: "Cautions" },
+  pages: {
+    navigation: "Pages of the pane",
+    thisCell: "This cell",
+    newFormula: "New formula",
+    library: "Surfaces and fluids",
+    workbook: "Whole workbook",
+    cautions: "Cautions",
+  },
   loading: "Reading the cell …",
   fault: (what: string): string => `The pane met a fault of its own (${what}). The sheet is not affected; select the cell again.`,
 
   trouble: {
     formulaUnread: (rest: string): string => `The formula cannot be read from “${rest}” on.`,
     unknownFunction: (name: string): string => `${name} is not a function of this version of Filmbook.`,
-    tooMany: (count: number, names: readonly string[]): string => `${count} arguments are given, but the function takes ${names.length}: ${list(names)}.`,
+    tooMany: (count: number, names: readonly string[]): string =>
+      `${count} arguments are given, but the function takes ${names.length}: ${list(names)}.`,
     argument: (name: string, text: string): string =>
       `${name}: what “${text}” comes to is known only to the sheet. Put it into a cell of its own and refer to that cell, and the pane can explain the result.`,
     noSelection: "No cell is selected.",
@@ -49,7 +57,14 @@ export const words = {
     shown: "The cell shows",
     value: "Value",
   },
-  verdict: { title: "Verdict", good: "In range", remark: "In range, with a remark", bad: "Not covered", flagged: "Out of range, shown marked", error: "Arguments to mend" },
+  verdict: {
+    title: "Verdict",
+    good: "In range",
+    remark: "In range, with a remark",
+    bad: "Not covered",
+    flagged: "Out of range, shown marked",
+    error: "Arguments to mend",
+  },
 
   problems: {
     title: "What to mend",
@@ -75,7 +90,8 @@ export const words = {
     title: "Equation",
     source: "Source",
     scatter: (percent: string, origin: string): string => `Scatter ±${percent} % (${origin})`,
-    properties: (at: string): string => `Properties at: ${at === "film" ? "the film temperature, mean of surface and bulk" : at === "bulk" ? "the bulk temperature" : at}`,
+    properties: (at: string): string =>
+      `Properties at: ${at === "film" ? "the film temperature, mean of surface and bulk" : at === "bulk" ? "the bulk temperature" : at}`,
     confidence: {
       S: "The text of the source was seen.",
       N: "Its constants are confirmed by an exact solution, a worked example or an independent implementation.",
@@ -86,7 +102,16 @@ export const words = {
     maths: (name: string): string => `Equation for ${name}; arrow keys move through its symbols`,
   },
 
-  inputs: { title: "Inputs", name: "Input", given: "In the cell", read: "Read as", omitted: "not given", settings: "Settings", none: "none", formula: "In the formula" },
+  inputs: {
+    title: "Inputs",
+    name: "Input",
+    given: "In the cell",
+    read: "Read as",
+    omitted: "not given",
+    settings: "Settings",
+    none: "none",
+    formula: "In the formula",
+  },
   state: { title: "Fluid", at: (state: string): string => `At ${state}`, source: "Source of the properties" },
   groups: { title: "Groups and lengths" },
   table: { symbol: "Symbol", meaning: "Meaning", value: "Value", unit: "Unit" },
@@ -134,11 +159,13 @@ export const words = {
     theme: { system: "Theme: system", dark: "Theme: dark", light: "Theme: light" },
     starting: "Opening the sheet …",
     failed: (why: string): string => `The sheet could not be opened: ${why}`,
-    unreadable: "What was kept in this browser could not be read; the example is shown. Your kept sheet is left alone until you change something.",
+    unreadable:
+      "What was kept in this browser could not be read; the example is shown. Your kept sheet is left alone until you change something.",
   },
 
   excel: {
-    notExcel: "This page is the Filmbook pane of Excel and found no Excel around it. Open it from the add-in's button, or use the standalone sheet.",
+    notExcel:
+      "This page is the Filmbook pane of Excel and found no Excel around it. Open it from the add-in's button, or use the standalone sheet.",
     tooOld: "This version of Excel does not tell the pane which cell is selected.",
   },
 };

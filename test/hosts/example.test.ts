@@ -8,10 +8,15 @@ import { parseArea } from "../../src/pane/reference.js";
 import { MemoryHost } from "../pane/memory-host.js";
 
 const cells = Object.fromEntries(
-  example.sheets.map((sheet) => [sheet.name, Object.fromEntries(sheet.cells.filter((one) => one.value !== undefined).map((one) => [one.at, one.value as string | number]))]),
+  example.sheets.map((sheet) => [
+    sheet.name,
+    Object.fromEntries(sheet.cells.filter((one) => one.value !== undefined).map((one) => [one.at, one.value as string | number])),
+  ]),
 );
 const formulas = example.sheets.flatMap((sheet) =>
-  sheet.cells.filter((one) => typeof one.value === "string" && one.value.startsWith("=")).map((one) => [sheet.name, one.at, one.value as string] as const),
+  sheet.cells
+    .filter((one) => typeof one.value === "string" && one.value.startsWith("="))
+    .map((one) => [sheet.name, one.at, one.value as string] as const),
 );
 
 /** Cells that are there to be refused, and what they must say. */
@@ -42,7 +47,11 @@ describe.each(formulas)("%s %s %s", (sheet, at) => {
     const block = await host.block({ sheet, row: area.row, column: area.column });
     const taken = Object.keys(cells[sheet] ?? {}).filter((other) => {
       const place = parseArea(other) as { row: number; column: number };
-      const isInside = place.row >= area.row && place.row < area.row + block.length && place.column >= area.column && place.column < area.column + (block[0]?.length ?? 0);
+      const isInside =
+        place.row >= area.row &&
+        place.row < area.row + block.length &&
+        place.column >= area.column &&
+        place.column < area.column + (block[0]?.length ?? 0);
       return isInside && other !== at;
     });
     expect(taken).toEqual([]);
@@ -62,11 +71,15 @@ test("the workbook holds each cell of the example once, and survives being kept 
   expect(book.sheetOrder).toHaveLength(example.sheets.length);
   const first = book.sheets[book.sheetOrder[0] as string];
   expect(first?.cellData?.[4]?.[1]).toEqual({ f: '=FILM.FREE.PLATE("air",80,20,0.3)', s: "two" });
-  const calculated = { ...book, sheets: { a: { ...first, cellData: { 0: { 0: { f: "=1", v: 1, t: 2, s: "two" }, 1: { v: 7, t: 2 } } } } } } as typeof book;
+  const calculated = {
+    ...book,
+    sheets: { a: { ...first, cellData: { 0: { 0: { f: "=1", v: 1, t: 2, s: "two" }, 1: { v: 7, t: 2 } } } } },
+  } as typeof book;
   expect(withoutResults(calculated).sheets.a?.cellData).toEqual({ 0: { 0: { f: "=1", s: "two" }, 1: { v: 7, t: 2 } } });
 });
 
 test("every style of a cell is a style of the workbook", () => {
   const known = new Set(Object.keys(exampleWorkbook().styles));
-  for (const sheet of example.sheets) for (const cell of sheet.cells) expect(known.has(cell.style), `${sheet.name} ${cell.at} ${cell.style}`).toBe(true);
+  for (const sheet of example.sheets)
+    for (const cell of sheet.cells) expect(known.has(cell.style), `${sheet.name} ${cell.at} ${cell.style}`).toBe(true);
 });

@@ -109,7 +109,11 @@ describe("reading", () => {
   test("B2# is what B2 spills", async () => {
     const { host } = hosted();
     const [block] = await host.read([{ sheet: "Walls", row: 1, column: 1, rows: 1, columns: 1, spilled: true }]);
-    expect(block).toEqual([[3.9, "in range"], [4.6, ""], [5.0, ""]]);
+    expect(block).toEqual([
+      [3.9, "in range"],
+      [4.6, ""],
+      [5.0, ""],
+    ]);
   });
 
   test.each([
@@ -130,7 +134,7 @@ describe("reading", () => {
 describe("writing and finding", () => {
   test("a formula and its inputs", async () => {
     const { host, standIn } = hosted();
-    await host.write({ sheet: "Empty", row: 1, column: 1 }, [[80, "=FILM.PRANDTL(\"air\",B2)"]]);
+    await host.write({ sheet: "Empty", row: 1, column: 1 }, [[80, '=FILM.PRANDTL("air",B2)']]);
     expect(standIn.book.sheets.Empty).toEqual({ B2: { value: 80 }, C2: { formula: '=FILM.PRANDTL("air",B2)', value: 0 } });
     await expect(host.write({ sheet: "Nowhere", row: 0, column: 0 }, [[1]])).rejects.toThrow(/Nowhere/);
   });

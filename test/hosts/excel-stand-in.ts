@@ -30,7 +30,11 @@ interface Box {
 
 export class StandIn {
   syncs = 0;
-  readonly listeners: Record<"selection" | "calculated" | "changed", Set<() => Promise<void>>> = { selection: new Set(), calculated: new Set(), changed: new Set() };
+  readonly listeners: Record<"selection" | "calculated" | "changed", Set<() => Promise<void>>> = {
+    selection: new Set(),
+    calculated: new Set(),
+    changed: new Set(),
+  };
 
   constructor(
     readonly book: StandInBook,
@@ -65,7 +69,7 @@ export class StandIn {
   private pending: (() => void)[] = [];
 
   private context(): unknown {
-    const context = {
+    const context: { sync(): Promise<void>; workbook: object } = {
       sync: () => {
         this.syncs++;
         const waiting = this.pending;
@@ -85,7 +89,9 @@ export class StandIn {
       load: (names: string) => {
         this.pending.push(() => {
           ready.add("isNullObject");
-          if (!isNull) for (const name of names.split(",")) ready.add(name.trim().split("/").at(-1) as string).add(name.trim().split("/")[0] as string);
+          if (!isNull)
+            for (const name of names.split(","))
+              ready.add(name.trim().split("/").at(-1) as string).add(name.trim().split("/")[0] as string);
         });
       },
     };
@@ -96,7 +102,8 @@ export class StandIn {
         configurable: true,
         set: setter,
         get: () => {
-          if (!ready.has(name)) throw new Error(`The property '${name}' is not available. Before reading the property's value, call the load method.`);
+          if (!ready.has(name))
+            throw new Error(`The property '${name}' is not available. Before reading the property's value, call the load method.`);
           return read();
         },
       });
@@ -124,7 +131,12 @@ export class StandIn {
       onSelectionChanged: events("selection"),
       worksheets: this.proxy(
         { items: () => Object.keys(book.sheets).map((name) => this.loadedSheet(name)) },
-        { getItemOrNullObject: (name: string) => (this.sheetName(name) === undefined ? this.nothing() : this.sheet(this.sheetName(name) as string)), onCalculated: events("calculated"), onChanged: events("changed") },
+        {
+          getItemOrNullObject: (name: string) =>
+            this.sheetName(name) === undefined ? this.nothing() : this.sheet(this.sheetName(name) as string),
+          onCalculated: events("calculated"),
+          onChanged: events("changed"),
+        },
       ),
     };
   }
@@ -144,7 +156,8 @@ export class StandIn {
     return this.proxy(
       { name: () => name },
       {
-        getRangeByIndexes: (row: number, column: number, rows: number, columns: number) => this.range({ sheet: name, row, column, rows, columns }),
+        getRangeByIndexes: (row: number, column: number, rows: number, columns: number) =>
+          this.range({ sheet: name, row, column, rows, columns }),
         getUsedRangeOrNullObject: () => this.used(name),
         names: { getItemOrNullObject: () => this.nothing() },
         activate: () => {
@@ -173,9 +186,14 @@ export class StandIn {
   }
 
   private range(box: Box): object {
-    if (!(box.rows >= 1 && box.columns >= 1 && Number.isFinite(box.rows * box.columns))) throw new Error("InvalidArgument: a range has at least one cell");
-    const grid = <T>(read: (cell: StandInCell | undefined) => T): (() => T[][]) => () =>
-      Array.from({ length: box.rows }, (_, i) => Array.from({ length: box.columns }, (__, j) => read(this.cellAt(box.sheet, box.row + i, box.column + j))));
+    if (!(box.rows >= 1 && box.columns >= 1 && Number.isFinite(box.rows * box.columns)))
+      throw new Error("InvalidArgument: a range has at least one cell");
+    const grid =
+      <T>(read: (cell: StandInCell | undefined) => T): (() => T[][]) =>
+      () =>
+        Array.from({ length: box.rows }, (_, i) =>
+          Array.from({ length: box.columns }, (__, j) => read(this.cellAt(box.sheet, box.row + i, box.column + j))),
+        );
     const { book } = this;
     const outer = this;
     return this.proxy(
@@ -186,7 +204,9 @@ export class StandIn {
         rowCount: () => box.rows,
         columnCount: () => box.columns,
         values: grid((cell) => cell?.value ?? ""),
-        valueTypes: grid((cell) => (cell?.isError === true ? "Error" : cell === undefined ? "Empty" : typeof cell.value === "number" ? "Double" : "String")),
+        valueTypes: grid((cell) =>
+          cell?.isError === true ? "Error" : cell === undefined ? "Empty" : typeof cell.value === "number" ? "Double" : "String",
+        ),
         text: grid((cell) => cell?.text ?? String(cell?.value ?? "")),
         formulas: grid((cell) => cell?.formula ?? cell?.value ?? ""),
       },
@@ -227,7 +247,12 @@ export class StandIn {
     for (const [anchor, area] of Object.entries(this.book.spills ?? {})) {
       const at = this.boxOf(anchor);
       const block = this.boxOf(`${at.sheet}!${area}`);
-      const inside = box.sheet === at.sheet && box.row >= block.row && box.row < block.row + block.rows && box.column >= block.column && box.column < block.column + block.columns;
+      const inside =
+        box.sheet === at.sheet &&
+        box.row >= block.row &&
+        box.row < block.row + block.rows &&
+        box.column >= block.column &&
+        box.column < block.column + block.columns;
       if (inside) return this.range(at);
     }
     return this.nothing();
@@ -237,7 +262,10 @@ export class StandIn {
     const stands = Object.entries(this.book.names ?? {}).find(([one]) => one.toLowerCase() === name.toLowerCase())?.[1];
     if (stands === undefined) return this.nothing();
     const isRange = typeof stands === "string" && stands.startsWith("=");
-    return this.proxy({ value: () => stands }, { getRangeOrNullObject: () => (isRange ? this.range(this.boxOf((stands as string).slice(1))) : this.nothing()) });
+    return this.proxy(
+      { value: () => stands },
+      { getRangeOrNullObject: () => (isRange ? this.range(this.boxOf((stands as string).slice(1))) : this.nothing()) },
+    );
   }
 
   private table(name: string): object {
@@ -249,7 +277,9 @@ export class StandIn {
         columns: {
           getItemOrNullObject: (column: string) => {
             const area = columns[column];
-            return area === undefined ? this.nothing() : this.proxy({ name: () => column }, { getDataBodyRange: () => this.range(this.boxOf(area)) });
+            return area === undefined
+              ? this.nothing()
+              : this.proxy({ name: () => column }, { getDataBodyRange: () => this.range(this.boxOf(area)) });
           },
         },
       },

@@ -125,7 +125,9 @@ export class MemoryHost implements SheetHost {
     const columns = Number.isFinite(area.columns) ? area.columns : Math.max(1, ...used.map((one) => (one?.column ?? 0) + 1));
     return Promise.all(
       Array.from({ length: rows }, (_, i) =>
-        Promise.all(Array.from({ length: columns }, (__, j) => this.valueAt({ sheet: area.sheet, row: area.row + i, column: area.column + j }))),
+        Promise.all(
+          Array.from({ length: columns }, (__, j) => this.valueAt({ sheet: area.sheet, row: area.row + i, column: area.column + j })),
+        ),
       ),
     );
   }

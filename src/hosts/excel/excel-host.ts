@@ -59,7 +59,13 @@ export class ExcelHost implements SheetHost {
   }
 
   onValuesChanged(listener: () => void): () => void {
-    return this.listen(({ workbook }) => [...(this.has("1.8") ? [workbook.worksheets.onCalculated] : []), ...(this.has("1.9") ? [workbook.worksheets.onChanged] : [])], listener);
+    return this.listen(
+      ({ workbook }) => [
+        ...(this.has("1.8") ? [workbook.worksheets.onCalculated] : []),
+        ...(this.has("1.9") ? [workbook.worksheets.onChanged] : []),
+      ],
+      listener,
+    );
   }
 
   /** Registering takes a round trip: who stops listening before it is done still gets rid of it. */
@@ -116,12 +122,16 @@ export class ExcelHost implements SheetHost {
 
   readName(name: string, at: Place): Promise<CellBlock | undefined> {
     const column = tableColumn.exec(name)?.groups;
-    return column === undefined ? this.readDefinedName(name, at) : this.readTableColumn(column.table as string, (column.column ?? column.inner) as string, column.row !== undefined, at);
+    return column === undefined
+      ? this.readDefinedName(name, at)
+      : this.readTableColumn(column.table as string, (column.column ?? column.inner) as string, column.row !== undefined, at);
   }
 
   private readDefinedName(name: string, at: Place): Promise<CellBlock | undefined> {
     if (!this.has("1.4")) return Promise.resolve(undefined);
-    const [sheet, bare] = name.includes("!") ? [unquoted(name.slice(0, name.lastIndexOf("!"))), name.slice(name.lastIndexOf("!") + 1)] : [at.sheet, name];
+    const [sheet, bare] = name.includes("!")
+      ? [unquoted(name.slice(0, name.lastIndexOf("!"))), name.slice(name.lastIndexOf("!") + 1)]
+      : [at.sheet, name];
     return this.excel.run(async (context) => {
       const { workbook } = context;
       const worksheet = workbook.worksheets.getItemOrNullObject(sheet);
@@ -233,12 +243,16 @@ function rangeFor(area: Area, sheet: Worksheet, known: CellRange | undefined): C
 }
 
 function blockOf(range: CellRange): CellBlock {
-  return range.values.map((row, i) => row.map((value, j) => (range.valueTypes[i]?.[j] === "Error" ? { code: String(value), message: "" } : value)));
+  return range.values.map((row, i) =>
+    row.map((value, j) => (range.valueTypes[i]?.[j] === "Error" ? { code: String(value), message: "" } : value)),
+  );
 }
 
 /** A name may stand for a number or a text of its own: the host then gives the value itself. */
 function constantOf(value: unknown): CellBlock | undefined {
-  return typeof value === "number" || typeof value === "boolean" || (typeof value === "string" && !value.startsWith("=")) ? [[value]] : undefined;
+  return typeof value === "number" || typeof value === "boolean" || (typeof value === "string" && !value.startsWith("="))
+    ? [[value]]
+    : undefined;
 }
 
 function unquoted(sheet: string): string {
@@ -253,7 +267,12 @@ async function formulasOf(sheet: Worksheet, wanted: string, context: ExcelContex
   const found: FormulaCell[] = [];
   const rowsAtOnce = Math.max(1, Math.floor(cellsAtOnce / used.columnCount));
   for (let from = 0; from < used.rowCount; from += rowsAtOnce) {
-    const strip = sheet.getRangeByIndexes(used.rowIndex + from, used.columnIndex, Math.min(rowsAtOnce, used.rowCount - from), used.columnCount);
+    const strip = sheet.getRangeByIndexes(
+      used.rowIndex + from,
+      used.columnIndex,
+      Math.min(rowsAtOnce, used.rowCount - from),
+      used.columnCount,
+    );
     strip.load("rowIndex,columnIndex,formulas,text");
     await context.sync();
     collect(strip, sheet.name, wanted, found);

@@ -3,7 +3,20 @@
  * are the job itself. All figures of the scenario are our own.
  */
 
-export type StyleName = "title" | "lead" | "step" | "note" | "head" | "input" | "text" | "one" | "two" | "three" | "whole" | "group" | "words";
+export type StyleName =
+  | "title"
+  | "lead"
+  | "step"
+  | "note"
+  | "head"
+  | "input"
+  | "text"
+  | "one"
+  | "two"
+  | "three"
+  | "whole"
+  | "group"
+  | "words";
 
 export interface ExampleCell {
   readonly at: string;
@@ -26,7 +39,9 @@ export interface ExampleSheet {
 /** Cells in a row from one on, all of one style unless they name their own; undefined leaves a cell empty. */
 function line(from: string, style: StyleName, ...values: readonly (string | number | undefined)[]): readonly ExampleCell[] {
   const [, letter = "A", row = "1"] = /^([A-Z])(\d+)$/.exec(from) ?? [];
-  return values.flatMap((value, i) => (value === undefined ? [] : [{ at: `${String.fromCharCode(letter.charCodeAt(0) + i)}${row}`, value, style }]));
+  return values.flatMap((value, i) =>
+    value === undefined ? [] : [{ at: `${String.fromCharCode(letter.charCodeAt(0) + i)}${row}`, value, style }],
+  );
 }
 
 /** Empty cells that a spilled block will fill, styled in advance: one style for each column. */
@@ -54,7 +69,11 @@ const startHere = sheet(
     merged: ["A2:I2"],
   },
   line("A1", "title", "Film coefficients for a quayside battery-charging station"),
-  line("A2", "lead", "Five minutes: select any cell with a result and read beside the sheet where its number comes from. Then change a blue input and watch what follows."),
+  line(
+    "A2",
+    "lead",
+    "Five minutes: select any cell with a result and read beside the sheet where its number comes from. Then change a blue input and watch what follows.",
+  ),
 
   line("A4", "step", "1  Type a function into a cell"),
   line("A5", "note", "A plate 0.3 m high at 80 °C in air at 20 °C"),
@@ -123,7 +142,21 @@ const faces = sheet(
   },
   line("A1", "title", "Faces of the cabinet, summer evening, still air and wind"),
   line("A3", "step", "Walls in still air"),
-  line("A4", "head", "face", "Ts [°C]", "Tb [°C]", "height [m]", "area [m²]", heads.h, "h low", "h high", heads.rate, heads.reference, "verdict"),
+  line(
+    "A4",
+    "head",
+    "face",
+    "Ts [°C]",
+    "Tb [°C]",
+    "height [m]",
+    "area [m²]",
+    heads.h,
+    "h low",
+    "h high",
+    heads.rate,
+    heads.reference,
+    "verdict",
+  ),
   line("A5", "text", "quay side"),
   line("A6", "text", "harbour side"),
   line("A7", "text", "door"),
@@ -206,7 +239,21 @@ const loop = sheet(
   },
   line("A1", "title", "The cooling loop: tube inside, hose outside"),
   line("A3", "step", "Inside the tube: water against a glycol mixture, by flow"),
-  line("A4", "head", "coolant", "wall [°C]", "bulk [°C]", "flow", "diameter", heads.h, "h low", "h high", "Re", "pressure drop [kPa]", "verdict"),
+  line(
+    "A4",
+    "head",
+    "coolant",
+    "wall [°C]",
+    "bulk [°C]",
+    "flow",
+    "diameter",
+    heads.h,
+    "h low",
+    "h high",
+    "Re",
+    "pressure drop [kPa]",
+    "verdict",
+  ),
   line("A5", "input", "water", 45, 38, "0.03 kg/s", "12 mm"),
   line("A6", "input", "water", 45, 38, "0.12 kg/s", "12 mm"),
   line("A7", "input", "ethylene glycol 40 %", 45, 38, "0.03 kg/s", "12 mm"),
@@ -239,7 +286,11 @@ const againstTemperature = sheet(
     frozenRows: 4,
   },
   line("A1", "title", "A temperature-dependent boundary for a conduction solver"),
-  line("A2", "note", "Quay-side wall, 1.9 m high, air at 20 °C. The table crosses zero difference: there the limit of the equation stands."),
+  line(
+    "A2",
+    "note",
+    "Quay-side wall, 1.9 m high, air at 20 °C. The table crosses zero difference: there the limit of the equation stands.",
+  ),
   line("A4", "head", "Ts [°C]", heads.h, "h low", "h high", heads.reference, "verdict"),
   ...[-20, -10, 0.5, 10, 18, 20, 22, 30, 40, 50, 60, 70, 80].map((Ts, i) => line(`A${5 + i}`, "input", Ts)),
   room("B5", 13, "two", "two", "two", "one", "words"),

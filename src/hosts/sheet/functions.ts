@@ -82,16 +82,17 @@ function blockOf(argument: BaseValueObject | undefined): unknown[][] | null {
 
 function cellOf(value: BaseValueObject | null | undefined | void): unknown {
   if (!value || value.isNull()) return "";
-  if (value.isError()) return new CellError((value as ErrorValueObject).getErrorType() as CellError["code"], (value as ErrorValueObject).getErrorContent());
+  if (value.isError())
+    return new CellError((value as ErrorValueObject).getErrorType() as CellError["code"], (value as ErrorValueObject).getErrorContent());
   return value.getValue();
 }
 
 function resultOf(result: unknown): BaseValueObject {
-  if (!Array.isArray(result)) return valueOf(result);
+  if (!Array.isArray(result)) return valueFor(result);
   const rows = result as readonly (readonly unknown[])[];
-  if (rows.length === 1 && rows[0]?.length === 1) return valueOf(rows[0][0]);
+  if (rows.length === 1 && rows[0]?.length === 1) return valueFor(rows[0][0]);
   return ArrayValueObject.create({
-    calculateValueList: rows.map((row) => row.map(valueOf)),
+    calculateValueList: rows.map((row) => row.map(valueFor)),
     rowCount: rows.length,
     columnCount: rows[0]?.length ?? 0,
     unitId: "",
@@ -103,10 +104,11 @@ function resultOf(result: unknown): BaseValueObject {
 
 const errorTypes: ReadonlySet<string> = new Set(Object.values(ErrorType));
 
-function valueOf(cell: unknown): BaseValueObject {
+function valueFor(cell: unknown): BaseValueObject {
   if (typeof cell === "number") return Number.isFinite(cell) ? NumberValueObject.create(cell) : ErrorValueObject.create(ErrorType.NUM);
   if (typeof cell === "boolean") return BooleanValueObject.create(cell);
-  if (isErrorCell(cell)) return ErrorValueObject.create((errorTypes.has(cell.code) ? cell.code : ErrorType.VALUE) as ErrorType, cell.message);
+  if (isErrorCell(cell))
+    return ErrorValueObject.create((errorTypes.has(cell.code) ? cell.code : ErrorType.VALUE) as ErrorType, cell.message);
   return StringValueObject.create(cell === null || cell === undefined ? "" : String(cell));
 }
 

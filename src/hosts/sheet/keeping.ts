@@ -49,7 +49,9 @@ function isWorkbook(thing: unknown): thing is WorkbookData {
 
 /** The workbook without what formulas come to: that is worked out anew when it is opened, by whatever version opens it. */
 export function withoutResults(workbook: WorkbookData): WorkbookData {
-  const sheets = Object.entries(workbook.sheets).map(([id, sheet]) => [id, { ...sheet, cellData: withoutValues(sheet.cellData ?? {}) }] as const);
+  const sheets = Object.entries(workbook.sheets).map(
+    ([id, sheet]) => [id, { ...sheet, cellData: withoutValues(sheet.cellData ?? {}) }] as const,
+  );
   return { ...workbook, sheets: Object.fromEntries(sheets) };
 }
 

@@ -63,7 +63,9 @@ function sheetOf(sheet: ExampleSheet, id: string): Sheet {
     columnData: Object.fromEntries(sheet.widths.map((w, i) => [i, { w }])),
     rowData: Object.fromEntries(Object.entries(sheet.heights ?? {}).map(([row, h]) => [Number(row) - 1, { h, ia: 0 }])) as Sheet["rowData"],
     mergeData: (sheet.merged ?? []).map(rangeOf),
-    ...(sheet.frozenRows === undefined ? {} : { freeze: { xSplit: 0, ySplit: sheet.frozenRows, startRow: sheet.frozenRows, startColumn: -1 } }),
+    ...(sheet.frozenRows === undefined
+      ? {}
+      : { freeze: { xSplit: 0, ySplit: sheet.frozenRows, startRow: sheet.frozenRows, startColumn: -1 } }),
   };
 }
 

@@ -19,7 +19,11 @@ const errorCodes: ReadonlySet<string> = new Set(
   "#DIV/0! #NAME? #VALUE! #NUM! #N/A #CYCLE! #REF! #SPILL! #CALC! #ERROR! #GETTING_DATA #NULL!".split(" "),
 );
 const evaluationTime = 2000;
-const selecting: ReadonlySet<string> = new Set(["sheet.operation.set-selections", "sheet.operation.set-worksheet-active", "sheet.mutation.set-worksheet-name"]);
+const selecting: ReadonlySet<string> = new Set([
+  "sheet.operation.set-selections",
+  "sheet.operation.set-worksheet-active",
+  "sheet.mutation.set-worksheet-name",
+]);
 
 export class UniverHost implements SheetHost {
   private readonly themeListeners = new Set<() => void>();
@@ -65,7 +69,8 @@ export class UniverHost implements SheetHost {
 
   private spillAt(sheet: FWorksheet, place: Place): Spill | undefined {
     for (const [row, column, range] of this.spills(sheet)) {
-      const inside = place.row >= range.startRow && place.row <= range.endRow && place.column >= range.startColumn && place.column <= range.endColumn;
+      const inside =
+        place.row >= range.startRow && place.row <= range.endRow && place.column >= range.startColumn && place.column <= range.endColumn;
       if (!inside || (place.row === row && place.column === column)) continue;
       const anchor = { sheet: place.sheet, row, column };
       return {
@@ -101,7 +106,9 @@ export class UniverHost implements SheetHost {
     const own = sheet.getSheet().getCellRaw(row, column)?.v;
     if (own !== undefined && own !== null && own !== "") return own;
     const spilled = this.model.getArrayFormulaCellData()[this.book?.getId() ?? ""]?.[sheet.getSheetId()];
-    return (spilled as Record<number, Record<number, { v?: unknown } | undefined> | undefined> | undefined)?.[row]?.[column]?.v ?? own ?? "";
+    return (
+      (spilled as Record<number, Record<number, { v?: unknown } | undefined> | undefined> | undefined)?.[row]?.[column]?.v ?? own ?? ""
+    );
   }
 
   /** The sheet's own selection events miss the first move by the name box: the commands behind them do not. */
@@ -143,7 +150,9 @@ export class UniverHost implements SheetHost {
   private cut(sheet: FWorksheet, area: Area): { readonly rows: number; readonly columns: number } {
     if (area.spilled === true) {
       const own = [...this.spills(sheet)].find(([row, column]) => row === area.row && column === area.column)?.[2];
-      return own === undefined ? { rows: 1, columns: 1 } : { rows: own.endRow - own.startRow + 1, columns: own.endColumn - own.startColumn + 1 };
+      return own === undefined
+        ? { rows: 1, columns: 1 }
+        : { rows: own.endRow - own.startRow + 1, columns: own.endColumn - own.startColumn + 1 };
     }
     if (Number.isFinite(area.rows) && Number.isFinite(area.columns)) return area;
     let [lastRow, lastColumn] = [sheet.getLastRow(), sheet.getLastColumn()];
@@ -173,7 +182,10 @@ export class UniverHost implements SheetHost {
     const sheet = this.sheetNamed(at.sheet)?.getSheetId();
     if (unit === undefined || sheet === undefined) return undefined;
     const formula = expression.startsWith("=") ? expression : `=${expression}`;
-    const found = await this.api.getFormula().executeFormulas({ [unit]: { [sheet]: { [at.row]: { [at.column]: [formula] } } } }, evaluationTime).catch(() => undefined);
+    const found = await this.api
+      .getFormula()
+      .executeFormulas({ [unit]: { [sheet]: { [at.row]: { [at.column]: [formula] } } } }, evaluationTime)
+      .catch(() => undefined);
     const value = found?.[unit]?.[sheet]?.[at.row]?.[at.column]?.[0]?.value;
     if (value === undefined || value === null) return undefined;
     return Array.isArray(value) ? value.map((row) => row.map(cellOf)) : [[cellOf(value)]];
@@ -183,7 +195,11 @@ export class UniverHost implements SheetHost {
     const sheet = this.sheetNamed(at.sheet);
     const columns = cells[0]?.length ?? 0;
     if (sheet === undefined || columns === 0) return Promise.reject(new Error(`no sheet “${at.sheet}”`));
-    const data = cells.map((row) => row.map((one) => (typeof one === "string" && one.startsWith("=") ? { f: one, v: null, p: null } : { v: one, f: null, si: null, p: null })));
+    const data = cells.map((row) =>
+      row.map((one) =>
+        typeof one === "string" && one.startsWith("=") ? { f: one, v: null, p: null } : { v: one, f: null, si: null, p: null },
+      ),
+    );
     sheet.getRange(at.row, at.column, cells.length, columns).setValues(data);
     return Promise.resolve();
   }
@@ -193,13 +209,16 @@ export class UniverHost implements SheetHost {
     const found: FormulaCell[] = [];
     for (const sheet of this.book?.getSheets() ?? []) {
       const name = sheet.getSheetName();
-      sheet.getSheet().getCellMatrix().forValue((row, column, cell) => {
-        if (cell === null || cell === undefined || (!cell.f && !cell.si)) return;
-        const formula = this.formulaAt(sheet, row, column);
-        if (!formula.toLowerCase().includes(wanted)) return;
-        const place = { sheet: name, row, column };
-        found.push({ place, address: addressOf(place), formula, shown: String(this.valueAt(sheet, row, column) ?? "") });
-      });
+      sheet
+        .getSheet()
+        .getCellMatrix()
+        .forValue((row, column, cell) => {
+          if (cell === null || cell === undefined || (!cell.f && !cell.si)) return;
+          const formula = this.formulaAt(sheet, row, column);
+          if (!formula.toLowerCase().includes(wanted)) return;
+          const place = { sheet: name, row, column };
+          found.push({ place, address: addressOf(place), formula, shown: String(this.valueAt(sheet, row, column) ?? "") });
+        });
     }
     return Promise.resolve(found);
   }

@@ -7,18 +7,30 @@ function percent(part: number): string {
 }
 
 /** A whisker from low to high with the value on it; the one that was taken is filled. Decoration: the row says it in figures. */
-export function whisker(axis: Axis, low: number, value: number, high: number, kind: "taken" | "inside" | "outside", line?: number): PageElement {
+export function whisker(
+  axis: Axis,
+  low: number,
+  value: number,
+  high: number,
+  kind: "taken" | "inside" | "outside",
+  line?: number,
+): PageElement {
   const [from, at, to] = [along(axis, low), along(axis, value), along(axis, high)];
   const middle = 9;
   return svg(
     "svg",
     { class: "whisker", width: "100%", height: 18, "aria-hidden": "true" },
-    line !== undefined && svg("line", { class: "whisker-line", x1: percent(along(axis, line)), x2: percent(along(axis, line)), y1: 0, y2: 18 }),
+    line !== undefined &&
+      svg("line", { class: "whisker-line", x1: percent(along(axis, line)), x2: percent(along(axis, line)), y1: 0, y2: 18 }),
     svg("line", { class: `whisker-bar ${kind}`, x1: percent(from), x2: percent(to), y1: middle, y2: middle }),
     svg("line", { class: `whisker-bar ${kind}`, x1: percent(from), x2: percent(from), y1: middle - 4, y2: middle + 4 }),
     svg("line", { class: `whisker-bar ${kind}`, x1: percent(to), x2: percent(to), y1: middle - 4, y2: middle + 4 }),
     kind === "outside"
-      ? svg("svg", { x: percent(at), y: middle, overflow: "visible" }, svg("path", { class: "whisker-point outside", d: "M 0 -5 L 5 0 L 0 5 L -5 0 Z" }))
+      ? svg(
+          "svg",
+          { x: percent(at), y: middle, overflow: "visible" },
+          svg("path", { class: "whisker-point outside", d: "M 0 -5 L 5 0 L 0 5 L -5 0 Z" }),
+        )
       : svg("circle", { class: `whisker-point ${kind}`, cx: percent(at), cy: middle, r: kind === "taken" ? 5 : 4 }),
   );
 }

@@ -30,7 +30,10 @@ export function stripOf(test: RangeTest): Strip {
     interval: { from: openLow ? 0 : along(axis, test.low), to: openHigh ? 1 : along(axis, test.high), openLow, openHigh },
     point: { at: Math.min(1, Math.max(0, at)), beyond: at < 0 ? "low" : at > 1 ? "high" : undefined },
     within: test.within,
-    marks: marks(axis, mostMarks).map((value) => ({ at: along(axis, value), text: axis.scale === "log" ? powerOfTen(value) : figure(value) })),
+    marks: marks(axis, mostMarks).map((value) => ({
+      at: along(axis, value),
+      text: axis.scale === "log" ? powerOfTen(value) : figure(value),
+    })),
     says: words.ranges.sentence(test.symbol, figure(test.value), figure(test.low), figure(test.high), test.within, test.source),
   };
 }
@@ -75,7 +78,13 @@ export function stripDrawing(strip: Strip): PageElement {
     "svg",
     { class: "strip", width: "100%", height, role: "img", "aria-label": strip.says },
     svg("line", { class: "strip-axis", x1: "0%", x2: "100%", y1: middle, y2: middle }),
-    svg("rect", { class: "strip-interval", x: percent(interval.from), width: percent(interval.to - interval.from), y: middle - 5, height: 10 }),
+    svg("rect", {
+      class: "strip-interval",
+      x: percent(interval.from),
+      width: percent(interval.to - interval.from),
+      y: middle - 5,
+      height: 10,
+    }),
     interval.openLow ? arrow(interval.from, "low") : cap(interval.from),
     interval.openHigh ? arrow(interval.to, "high") : cap(interval.to),
     ...strip.marks.flatMap((mark) => markDrawing(mark)),
@@ -112,5 +121,8 @@ function markDrawing(mark: { readonly at: number; readonly text: string }): read
 function pointDrawing(point: Strip["point"], within: boolean): PageElement {
   if (within) return hung(point.at, svg("circle", { class: "strip-point", r: 6 }));
   if (point.beyond === undefined) return hung(point.at, svg("path", { class: "strip-point outside", d: "M 0 -8 L 8 0 L 0 8 L -8 0 Z" }));
-  return hung(point.at, svg("path", { class: "strip-point outside", d: point.beyond === "low" ? "M 0 0 L 11 -8 L 11 8 Z" : "M 0 0 L -11 -8 L -11 8 Z" }));
+  return hung(
+    point.at,
+    svg("path", { class: "strip-point outside", d: point.beyond === "low" ? "M 0 0 L 11 -8 L 11 8 Z" : "M 0 0 L -11 -8 L -11 8 Z" }),
+  );
 }

@@ -18,7 +18,10 @@ export interface Mending {
 const most = 4;
 
 export function mendings(formula: string, read: ReadCall, explanation: Explanation): readonly Mending[] {
-  const found = explanation.problems.length > 0 ? explanation.problems.flatMap((problem) => forProblem(formula, read, problem)) : forRange(formula, read, explanation);
+  const found =
+    explanation.problems.length > 0
+      ? explanation.problems.flatMap((problem) => forProblem(formula, read, problem))
+      : forRange(formula, read, explanation);
   return found.slice(0, most);
 }
 
@@ -76,7 +79,9 @@ function steps(one: string, other: string): number {
   for (let i = 1; i <= one.length; i++) {
     const next = [i];
     for (let j = 1; j <= other.length; j++) {
-      next.push(Math.min((row[j - 1] as number) + (one[i - 1] === other[j - 1] ? 0 : 1), (row[j] as number) + 1, (next[j - 1] as number) + 1));
+      next.push(
+        Math.min((row[j - 1] as number) + (one[i - 1] === other[j - 1] ? 0 : 1), (row[j] as number) + 1, (next[j - 1] as number) + 1),
+      );
     }
     row = next;
   }
@@ -86,7 +91,8 @@ function steps(one: string, other: string): number {
 /** The number kept, the unit one that belongs there: a length where a speed stood. */
 function withFittingUnit(id: string, name: string, given: string): readonly string[] {
   const surface = surfaceById(id);
-  const dimension = name === "bulk" || name === surface?.wallName ? "temperature" : surface?.arguments.find((one) => one.name === name)?.dimensions[0];
+  const dimension =
+    name === "bulk" || name === surface?.wallName ? "temperature" : surface?.arguments.find((one) => one.name === name)?.dimensions[0];
   const parsed = parseQuantity(given);
   if (dimension === undefined || parsed.kind !== "quantity") return [];
   const unit = defaultUnit(dimension, "SI").symbol;
@@ -112,6 +118,8 @@ export function withSetting(formula: string, read: ReadCall, name: string, value
   if (at < 0) return undefined;
   const present = read.call.args[at];
   if (present !== undefined && present.kind !== "text") return undefined;
-  const kept = (present?.value ?? "").split(";").filter((piece) => piece.trim() !== "" && piece.split("=")[0]?.trim().toLowerCase() !== name);
+  const kept = (present?.value ?? "")
+    .split(";")
+    .filter((piece) => piece.trim() !== "" && piece.split("=")[0]?.trim().toLowerCase() !== name);
   return withArgument(formula, read.call, at, quote([...kept.map((piece) => piece.trim()), `${name}=${value}`].join("; ")));
 }

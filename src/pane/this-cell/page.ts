@@ -54,12 +54,14 @@ class Follower {
       const cell = await readSelection(selection, this.frame.host);
       if (round === this.round) this.present(cell);
     } catch (fault) {
-      if (round === this.round) this.frame.show([el("p", { class: "trouble" }, words.fault(fault instanceof Error ? fault.message : String(fault)))]);
+      if (round === this.round)
+        this.frame.show([el("p", { class: "trouble" }, words.fault(fault instanceof Error ? fault.message : String(fault)))]);
     }
   }
 
   private present(cell: ReadCell): void {
-    if (cell.calls.length === 0 && cell.trouble === undefined) return this.frame.show(emptyView(this.actions(cell), cell.selection.address));
+    if (cell.calls.length === 0 && cell.trouble === undefined)
+      return this.frame.show(emptyView(this.actions(cell), cell.selection.address));
     const anchor = JSON.stringify(cell.anchor);
     if (anchor !== this.chosen.anchor || this.chosen.call >= cell.calls.length) this.chosen = { anchor, call: 0 };
     const { call } = this.chosen;
@@ -79,7 +81,8 @@ class Follower {
       ...(frame.has("new-formula")
         ? {
             compose: () => frame.open("new-formula"),
-            edit: () => read !== undefined && frame.open("new-formula", { edit: { formula: cell.formula, call: read.call, at: cell.anchor } }),
+            edit: () =>
+              read !== undefined && frame.open("new-formula", { edit: { formula: cell.formula, call: read.call, at: cell.anchor } }),
           }
         : {}),
     };

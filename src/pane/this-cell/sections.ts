@@ -1,4 +1,5 @@
 /** The sections of "This cell": each a pure function from what was found to what is shown. */
+import { type CellBlock, isErrorCell } from "../../cells/cell.js";
 import type { Explanation } from "../../cells/explanation.js";
 import type { Alternative, Contribution, EquationShown, Finding, RangeTest, Step, WordValue } from "../../findings/finding.js";
 import { formatNumber, formatQuantity } from "../../quantities/format.js";
@@ -39,7 +40,12 @@ export function verdictSection(explanation: Explanation): PageElement {
     "p",
     { class: `verdict ${kind}` },
     el("span", { class: "verdict-sign", "aria-hidden": "true" }, signs[kind]),
-    el("span", { class: "verdict-words" }, el("strong", {}, words.verdict[kind]), sentence !== undefined && sentence !== "in range" && `: ${raisedAnywhere(sentence)}`),
+    el(
+      "span",
+      { class: "verdict-words" },
+      el("strong", {}, words.verdict[kind]),
+      sentence !== undefined && sentence !== "in range" && `: ${raisedAnywhere(sentence)}`,
+    ),
   );
 }
 
@@ -76,7 +82,13 @@ function headline(finding: Finding, units: "SI" | "US"): readonly Child[] {
     finding.h !== undefined &&
       finding.hLow !== undefined &&
       finding.hHigh !== undefined &&
-      whisker(axisAround([finding.hLow, finding.hHigh], true), finding.hLow, finding.h, finding.hHigh, finding.inRange ? "taken" : "outside"),
+      whisker(
+        axisAround([finding.hLow, finding.hHigh], true),
+        finding.hLow,
+        finding.h,
+        finding.hHigh,
+        finding.inRange ? "taken" : "outside",
+      ),
   ];
   return parts.filter((one): one is Child => one !== false);
 }
@@ -87,7 +99,11 @@ function facts(finding: Finding, units: "SI" | "US"): PageElement {
     [words.result.reference, shownValue(finding.word("reference temperature"), units)],
     [words.result.flux, shownValue(finding.word("q"), units)],
   ];
-  return el("dl", { class: "facts" }, ...rows.map(([name, value]) => value !== undefined && el("div", {}, el("dt", {}, name), el("dd", {}, value))));
+  return el(
+    "dl",
+    { class: "facts" },
+    ...rows.map(([name, value]) => value !== undefined && el("div", {}, el("dt", {}, name), el("dd", {}, value))),
+  );
 }
 
 export function rangesSection(tests: readonly RangeTest[]): PageElement {
@@ -106,7 +122,11 @@ function rangeItem(test: RangeTest): PageElement {
       "p",
       { class: "range-head" },
       el("span", { class: "range-symbol" }, typesetSymbol(test.symbol), ` = ${figure(test.value)}`),
-      el("span", { class: "range-word" }, `${test.within ? words.ranges.inside : words.ranges.outside} ${words.ranges.interval(figure(test.low), figure(test.high))}`),
+      el(
+        "span",
+        { class: "range-word" },
+        `${test.within ? words.ranges.inside : words.ranges.outside} ${words.ranges.interval(figure(test.low), figure(test.high))}`,
+      ),
     ),
     stripDrawing(stripOf(test)),
     el("p", { class: "quiet small" }, `${test.meaning}. ${words.ranges.origin(test.source, test.origin)}`),
@@ -122,14 +142,23 @@ export function equationSection(equation: EquationShown, steps: readonly Step[])
     el("div", { class: "lines" }, ...equation.lines.map(([name, algebra], i) => lineShown(name, algebra, i, steps))),
     el("p", { class: "symbol-says quiet", role: "status", id: "symbol-says" }, words.equation.symbolHint),
     el("p", { class: "source" }, el("strong", {}, `${words.equation.source}: `), equation.source),
-    el("p", { class: "quiet small" }, `${words.equation.scatter(formatNumber(100 * equation.scatter, 3), equation.scatterOrigin)}. ${words.equation.properties(equation.propertiesAt)}.`),
-    words.equation.confidence[equation.confidence] !== undefined && el("p", { class: "quiet small" }, words.equation.confidence[equation.confidence]),
+    el(
+      "p",
+      { class: "quiet small" },
+      `${words.equation.scatter(formatNumber(100 * equation.scatter, 3), equation.scatterOrigin)}. ${words.equation.properties(equation.propertiesAt)}.`,
+    ),
+    words.equation.confidence[equation.confidence] !== undefined &&
+      el("p", { class: "quiet small" }, words.equation.confidence[equation.confidence]),
     equation.note !== "" && el("p", { class: "quiet small" }, equation.note),
     folded(
       "symbols",
       words.equation.symbols,
       false,
-      el("dl", { class: "symbol-list" }, ...symbols.map((name) => el("div", {}, el("dt", {}, typesetSymbol(name)), el("dd", {}, symbolSays(name, steps))))),
+      el(
+        "dl",
+        { class: "symbol-list" },
+        ...symbols.map((name) => el("div", {}, el("dt", {}, typesetSymbol(name)), el("dd", {}, symbolSays(name, steps)))),
+      ),
     ),
   );
 }
@@ -154,27 +183,39 @@ function lineShown(name: string, algebra: string, index: number, steps: readonly
   const tree = typesetLine(name, algebra);
   if (tree === undefined) return el("p", { class: "line plain" }, `${name} = ${algebra}`);
   const told = new Set<string>();
-  return el("div", { class: "line", role: "group", "aria-label": words.equation.maths(name), id: `line-${index}` }, telling(tree, steps, told));
+  return el(
+    "div",
+    { class: "line", role: "group", "aria-label": words.equation.maths(name), id: `line-${index}` },
+    telling(tree, steps, told),
+  );
 }
 
 /** Each symbol of the tree with what it says; the first one takes the tab key. */
 function telling(node: PageElement, steps: readonly Step[], told: Set<string>): PageElement {
   const name = node.attributes["data-symbol"];
-  const own: Readonly<Record<string, string>> = name === undefined ? {} : { "data-says": symbolSays(name, steps), tabindex: told.size === 0 ? "0" : "-1" };
+  const own: Readonly<Record<string, string>> =
+    name === undefined ? {} : { "data-says": symbolSays(name, steps), tabindex: told.size === 0 ? "0" : "-1" };
   if (name !== undefined) told.add(name);
-  return { ...node, attributes: { ...node.attributes, ...own }, children: node.children.map((child) => (typeof child === "string" ? child : telling(child, steps, told))) };
+  return {
+    ...node,
+    attributes: { ...node.attributes, ...own },
+    children: node.children.map((child) => (typeof child === "string" ? child : telling(child, steps, told))),
+  };
 }
 
-export function inputsSection(explanation: Explanation, texts: Readonly<Record<string, string>>): PageElement {
+export function inputsSection(explanation: Explanation, texts: Readonly<Record<string, string>>, settings: CellBlock | null): PageElement {
   const rows = explanation.inputs.map((one) => ({ ...one, text: texts[one.name] ?? "" }));
-  const settings = texts.settings;
   return section(
     "inputs",
     words.inputs.title,
     el(
       "table",
       { class: "table" },
-      el("thead", {}, el("tr", {}, ...[words.inputs.name, words.inputs.given, words.inputs.read].map((head) => el("th", { scope: "col" }, head)))),
+      el(
+        "thead",
+        {},
+        el("tr", {}, ...[words.inputs.name, words.inputs.given, words.inputs.read].map((head) => el("th", { scope: "col" }, head))),
+      ),
       el(
         "tbody",
         {},
@@ -183,14 +224,38 @@ export function inputsSection(explanation: Explanation, texts: Readonly<Record<s
             "tr",
             {},
             el("th", { scope: "row", title: row.describe }, row.name),
-            el("td", {}, row.given === "" ? words.inputs.omitted : row.given, row.text !== "" && isReference(row.text, row.given) && el("span", { class: "quiet small from" }, row.text)),
+            el(
+              "td",
+              {},
+              row.given === "" ? words.inputs.omitted : row.given,
+              row.text !== "" && isReference(row.text, row.given) && el("span", { class: "quiet small from" }, row.text),
+            ),
             el("td", {}, row.read),
           ),
         ),
       ),
     ),
-    settings !== undefined && el("p", { class: "small" }, el("strong", {}, `${words.inputs.settings}: `), settings),
+    settings !== null &&
+      el(
+        "p",
+        { class: "small" },
+        el("strong", {}, `${words.inputs.settings}: `),
+        settingsShown(settings),
+        texts.settings !== undefined &&
+          isReference(texts.settings, String(settings[0]?.[0])) &&
+          el("span", { class: "quiet small from" }, texts.settings),
+      ),
   );
+}
+
+/** Text as it is; two columns as "name = value"; a table by its rows. */
+export function settingsShown(settings: CellBlock): string {
+  const shown = (cell: unknown): string => (isErrorCell(cell) ? cell.code : String(cell ?? ""));
+  const rows = settings.map((row) => row.map(shown).filter((text) => text !== ""));
+  return rows
+    .filter((row) => row.length > 0)
+    .map((row) => row.join(row.length === 2 ? " = " : ", "))
+    .join("; ");
 }
 
 /** What stands in the formula is worth showing where it is not simply the value. */
@@ -210,14 +275,14 @@ export function stateSection(steps: readonly Step[]): PageElement | undefined {
   return section(
     "state",
     words.state.title,
-    ...[...states].map(([note, list]) => {
+    ...[...states].map(([note, list], i) => {
       const [where = "", ...sources] = note.split("; ");
       return el(
         "div",
         { class: "state-block" },
         el("h4", {}, where),
         stepTable(list),
-        sources.length > 0 && folded(`source-${where}`, words.state.source, false, el("p", { class: "quiet small" }, sources.join("; "))),
+        sources.length > 0 && folded(`source-${i}`, words.state.source, false, el("p", { class: "quiet small" }, sources.join("; "))),
       );
     }),
   );
@@ -232,12 +297,22 @@ function stepTable(steps: readonly Step[]): PageElement {
   return el(
     "table",
     { class: "table steps" },
-    el("thead", { class: "unseen" }, el("tr", {}, ...[words.table.symbol, words.table.meaning, words.table.value].map((head) => el("th", { scope: "col" }, head)))),
+    el(
+      "thead",
+      { class: "unseen" },
+      el("tr", {}, ...[words.table.symbol, words.table.meaning, words.table.value].map((head) => el("th", { scope: "col" }, head))),
+    ),
     el(
       "tbody",
       {},
       ...steps.map((one) =>
-        el("tr", {}, el("th", { scope: "row", class: "sym" }, typesetSymbol(one.symbol)), el("td", { class: "meaning" }, one.meaning), el("td", { class: "value" }, stepValue(one))),
+        el(
+          "tr",
+          {},
+          el("th", { scope: "row", class: "sym" }, typesetSymbol(one.symbol)),
+          el("td", { class: "meaning" }, one.meaning),
+          el("td", { class: "value" }, stepValue(one)),
+        ),
       ),
     ),
   );
@@ -309,7 +384,13 @@ export function compareSection(alternatives: readonly Alternative[], units: "SI"
           { class: kind, title: one.source },
           el("p", { class: "alternative-head" }, el("span", {}, one.equation), el("span", { class: "alternative-value" }, value)),
           one.h !== undefined && one.low !== undefined && one.high !== undefined && whisker(axis, one.low, one.h, one.high, kind, taken),
-          el("p", { class: "quiet small" }, [one.chosen ? words.compare.taken : "", one.inRange ? words.compare.inRange : raisedPowers(one.verdict)].filter((text) => text !== "").join("; ")),
+          el(
+            "p",
+            { class: "quiet small" },
+            [one.chosen ? words.compare.taken : "", one.inRange ? words.compare.inRange : raisedPowers(one.verdict)]
+              .filter((text) => text !== "")
+              .join("; "),
+          ),
         );
       }),
     ),
@@ -320,7 +401,9 @@ export function cautionsSection(cautions: readonly string[]): PageElement {
   return section(
     "cautions",
     words.cautions.title,
-    cautions.length === 0 ? el("p", { class: "quiet" }, words.cautions.none) : el("ul", { class: "caution-list" }, ...cautions.map((one) => el("li", {}, one))),
+    cautions.length === 0
+      ? el("p", { class: "quiet" }, words.cautions.none)
+      : el("ul", { class: "caution-list" }, ...cautions.map((one) => el("li", {}, one))),
   );
 }
 

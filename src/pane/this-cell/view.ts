@@ -38,13 +38,20 @@ export function emptyView(actions: Actions, address?: string): readonly Child[] 
     el("p", {}, words.empty.says),
     el("p", {}, words.empty.try),
     el("p", { class: "example" }, el("code", {}, words.empty.example), el("span", { class: "quiet small" }, ` ${words.empty.exampleSays}`)),
-    ...(actions.compose === undefined ? [] : [el("p", {}, el("button", { type: "button", id: "compose", click: actions.compose }, words.empty.compose))]),
+    ...(actions.compose === undefined
+      ? []
+      : [el("p", {}, el("button", { type: "button", id: "compose", click: actions.compose }, words.empty.compose))]),
   ];
 }
 
 function heading(title: string, address?: string, more?: string): PageElement {
   const where = [address === undefined ? "" : words.cell(address), more ?? ""].filter((one) => one !== "").join(", ");
-  return el("div", { class: "heading" }, where !== "" && el("p", { class: "quiet small where" }, where), el("h2", { tabindex: -1, id: "page-title" }, title));
+  return el(
+    "div",
+    { class: "heading" },
+    where !== "" && el("p", { class: "quiet small where" }, where),
+    el("h2", { tabindex: -1, id: "page-title" }, title),
+  );
 }
 
 /** The page for a cell with at least one FILM call, or with a formula that cannot be read. */
@@ -52,13 +59,23 @@ export function cellView(cell: ReadCell, chosen: number, explanation: Explanatio
   const { selection } = cell;
   const spilled = selection.spill === undefined ? undefined : words.spilledFrom(selection.spill.anchorAddress);
   const read = cell.calls[chosen];
-  if (read === undefined) return [heading(words.verdict.error, selection.address, spilled), el("p", { class: "trouble" }, cell.trouble ?? "")];
+  if (read === undefined)
+    return [heading(words.verdict.error, selection.address, spilled), el("p", { class: "trouble" }, cell.trouble ?? "")];
   const title = read.signature?.title ?? read.id;
   return [
     heading(title, selection.address, spilled),
-    el("p", { class: "function" }, el("code", {}, `FILM.${read.id}`), explanation !== undefined && explanation.cases > 1 && el("span", { class: "quiet" }, ` ${words.caseOf(explanation.caseNumber, explanation.cases)}`)),
+    el(
+      "p",
+      { class: "function" },
+      el("code", {}, `FILM.${read.id}`),
+      explanation !== undefined &&
+        explanation.cases > 1 &&
+        el("span", { class: "quiet" }, ` ${words.caseOf(explanation.caseNumber, explanation.cases)}`),
+    ),
     ...(cell.calls.length > 1 ? [chooser(cell.calls, chosen, actions)] : []),
-    ...(actions.edit === undefined || read.signature === undefined ? [] : [el("p", {}, el("button", { type: "button", id: "edit", class: "plain", click: actions.edit }, words.opens))]),
+    ...(actions.edit === undefined || read.signature === undefined
+      ? []
+      : [el("p", {}, el("button", { type: "button", id: "edit", class: "plain", click: actions.edit }, words.opens))]),
     ...(explanation === undefined ? troubles(read, selection.shown) : explained(cell, read, explanation, actions)),
   ];
 }
@@ -69,7 +86,12 @@ function chooser(calls: readonly ReadCall[], chosen: number, actions: Actions): 
     { class: "chooser" },
     el("legend", {}, words.chooser),
     ...calls.map((one, i) =>
-      el("label", { class: "choice" }, el("input", { type: "radio", name: "call", id: `call-${i}`, checked: i === chosen, change: () => actions.choose(i) }), el("code", {}, one.text)),
+      el(
+        "label",
+        { class: "choice" },
+        el("input", { type: "radio", name: "call", id: `call-${i}`, checked: i === chosen, change: () => actions.choose(i) }),
+        el("code", {}, one.text),
+      ),
     ),
   );
 }
@@ -81,7 +103,11 @@ function troubles(read: ReadCall, shown: string): readonly Child[] {
     section(
       "inputs",
       words.inputs.title,
-      el("dl", { class: "facts" }, ...Object.entries(read.texts).map(([name, text]) => el("div", {}, el("dt", {}, name), el("dd", {}, el("code", {}, text))))),
+      el(
+        "dl",
+        { class: "facts" },
+        ...Object.entries(read.texts).map(([name, text]) => el("div", {}, el("dt", {}, name), el("dd", {}, el("code", {}, text)))),
+      ),
     ),
   ];
 }
@@ -98,7 +124,7 @@ function explained(cell: ReadCell, read: ReadCall, explanation: Explanation, act
     read.id === "FLUID" && problems.length === 0 ? fluidTable(read) : undefined,
     finding !== undefined && steps.length > 0 ? rangesSection(finding.rangeTests()) : undefined,
     equation === undefined ? undefined : equationSection(equation, steps),
-    explanation.inputs.length > 0 ? inputsSection(explanation, read.texts) : undefined,
+    explanation.inputs.length > 0 ? inputsSection(explanation, read.texts, read.settings) : undefined,
     stateSection(steps),
     groupsSection(steps),
     finding === undefined ? undefined : boundsSection(finding, units),
@@ -123,7 +149,18 @@ function problemsSection(explanation: Explanation, mends: readonly Mending[], ac
     el("ul", { class: "trouble-list", role: "alert" }, ...sentences),
     mends.length > 0 && el("p", { class: "small" }, words.problems.offer),
     mends.length > 0 &&
-      el("ul", { class: "mends" }, ...mends.map((one, i) => el("li", {}, el("button", { type: "button", id: `mend-${i}`, click: () => actions.mend(one.formula) }, one.label), el("code", { class: "small" }, one.formula)))),
+      el(
+        "ul",
+        { class: "mends" },
+        ...mends.map((one, i) =>
+          el(
+            "li",
+            {},
+            el("button", { type: "button", id: `mend-${i}`, click: () => actions.mend(one.formula) }, one.label),
+            el("code", { class: "small" }, one.formula),
+          ),
+        ),
+      ),
   );
 }
 
@@ -146,7 +183,13 @@ function fluidTable(read: ReadCall): PageElement | undefined {
       "table",
       { class: "table" },
       el("thead", {}, el("tr", {}, ...head.map((one) => el("th", { scope: "col" }, cell(one))))),
-      el("tbody", {}, ...rows.slice(0, mostRows).map((row) => el("tr", {}, ...row.map((one, i) => el(i === 0 ? "th" : "td", i === 0 ? { scope: "row" } : {}, cell(one)))))),
+      el(
+        "tbody",
+        {},
+        ...rows
+          .slice(0, mostRows)
+          .map((row) => el("tr", {}, ...row.map((one, i) => el(i === 0 ? "th" : "td", i === 0 ? { scope: "row" } : {}, cell(one))))),
+      ),
     ),
   );
 }
