@@ -123,8 +123,23 @@ export interface Settled {
   readonly tolerances: readonly Tolerance[];
 }
 
+/** Quantities with a field of their own; the rest become numbers of the case. */
+const fields: ReadonlySet<string> = new Set([
+  "pressure",
+  "gravity",
+  "area",
+  "emissivity",
+  "surroundings",
+  "altitude",
+  "humidity",
+  "dewPoint",
+]);
+
+const unset = assemble("SI", { system: "SI", ambient: standardAmbient }, new Map(), new Map(), {}, {}, []);
+
 /** Reads one map of settings; error cells among them are reported by name. */
 export function settle(raw: ReadonlyMap<string, unknown>, known: readonly SettingDefinition[]): Settled | readonly Problem[] {
+  if (raw.size === 0) return unset;
   const problems: Problem[] = [];
   const words: Record<string, string> = {};
   const texts: Record<string, string> = {};
@@ -171,8 +186,6 @@ export function settle(raw: ReadonlyMap<string, unknown>, known: readonly Settin
   if (problems.length > 0) return problems;
   return assemble(system, reading, units, quantities, words, texts, known);
 }
-
-const fields = new Set(["pressure", "gravity", "area", "emissivity", "surroundings", "altitude", "humidity", "dewPoint"]);
 
 function assemble(
   system: "SI" | "US",

@@ -189,7 +189,7 @@ function groupProgram(name: string, buoyancy: "expansivity" | "densities"): Prog
   const key = `${name}|${buoyancy}`;
   let program = programs.get(key);
   if (program === undefined) {
-    const groups = standardGroups({ flow: "speed", buoyancy, local: false, given: new Set(), words: {} });
+    const groups = standardGroups({ key, flow: "speed", buoyancy, local: false, given: new Set(), words: {} });
     const lines: [string, string][] = [];
     const add = (symbol: string): void => {
       const text = groups[symbol];

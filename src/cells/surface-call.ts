@@ -11,6 +11,7 @@ import { type Cases, cellAt, isSingle, keyOfName, shapeOf } from "./cases.js";
 import { type CellBlock, CellError, type CellValue } from "./cell.js";
 import { isOwnTable, type RawCase, type ReadCase, readCase, readFluid } from "./inputs.js";
 import { layOut, problemCells, problemsEverywhere, unanswered } from "./layout.js";
+import { namedFluid } from "./make-up.js";
 import { errorOf, render } from "./render.js";
 import { isWanted, readRequest, type Request, type Wanted } from "./request.js";
 import { readSettings, type Settled, settle } from "./settings.js";
@@ -76,11 +77,18 @@ export function openSurfaceCall(
     settledRows[at] ??= settle(settingRows[at] as ReadonlyMap<string, unknown>, known);
     return settledRows[at] as Settled | readonly Problem[];
   };
-  let tableFluid: Fluid | readonly Problem[] | undefined;
+  // One cell names the fluid of all cases; it is found once for each way the settings make it up.
+  const fluids = new Map<Settled, Fluid | readonly Problem[]>();
+  const oneFluid = table || isSingle(fluidBlock);
   const fluidOf = (settled: Settled): Fluid | readonly Problem[] | undefined => {
-    if (!table) return undefined;
-    tableFluid ??= readFluid(fluidBlock, settled.reading);
-    return tableFluid;
+    if (!oneFluid) return undefined;
+    let found = fluids.get(settled);
+    if (found === undefined) {
+      const fluid = table ? readFluid(fluidBlock, settled.reading) : namedFluid(fluidBlock[0]?.[0], settled);
+      found = isProblem(fluid) ? [fluid] : fluid;
+      fluids.set(settled, found);
+    }
+    return found;
   };
   const manyCells = filled.map((one, i) => !(i === 0 && table) && !isSingle(one.block));
   const rawCase = (row: number, column: number): RawCase => {

@@ -1,6 +1,5 @@
 import { formatQuantity } from "../quantities/format.js";
-import type { Point } from "../surfaces/point.js";
-import { valueAt } from "../surfaces/bounds.js";
+import { type Point, valueAt } from "../surfaces/point.js";
 import { saturationTemperature } from "../surfaces/scene.js";
 
 const kelvin = 273.15;
@@ -20,7 +19,7 @@ export function cautionsAt(point: Point): readonly string[] {
   const { inputs, bulk } = point.scene;
   const list: string[] = [...(inputs.remarks ?? [])];
   const { fluid, pressure } = inputs;
-  if (point.byDensities) {
+  if (point.variant.buoyancy === "densities") {
     list.push(
       "Buoyancy is taken from the densities at surface and bulk, because expansivity times difference misses their difference by more than 10 %; near a density maximum the flow may split.",
     );

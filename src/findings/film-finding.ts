@@ -2,8 +2,9 @@ import { symbolMeaning } from "../correlations/symbols.js";
 import { printLine } from "../equations/rewrite.js";
 import { coverageProblem, isProblem, type Problem, sentenceOf, valueProblem } from "../quantities/problems.js";
 import type { Dimension } from "../quantities/quantity.js";
-import { type Interval, boundsOf, scatterAt, valueAt } from "../surfaces/bounds.js";
+import { type Interval, boundsOf, scatterAt } from "../surfaces/bounds.js";
 import { candidatesFor, labelOf } from "../surfaces/choice.js";
+import { valueAt } from "../surfaces/point.js";
 import { type Solution, solve } from "../surfaces/solution.js";
 import type { Inputs, Surface } from "../surfaces/surface.js";
 import { version } from "../version.js";
@@ -85,10 +86,10 @@ class NoFinding implements Finding {
 
 class FilmFinding implements Finding {
   readonly functionId: string;
-  readonly verdict: string;
   readonly inRange: boolean;
   readonly answered: boolean;
   private interval: Interval | undefined;
+  private judged: string | undefined;
 
   constructor(
     readonly surface: Surface,
@@ -96,11 +97,14 @@ class FilmFinding implements Finding {
     readonly solution: Solution,
   ) {
     this.functionId = surface.id;
-    this.verdict = verdictOf(solution);
     this.inRange = solution.point.inRange;
     this.answered = this.inRange || inputs.beyondRange === "flag";
   }
 
+  get verdict(): string {
+    this.judged ??= verdictOf(this.solution);
+    return this.judged;
+  }
   get h(): number | undefined {
     return this.answered ? this.solution.point.h : undefined;
   }
@@ -358,7 +362,7 @@ class FilmFinding implements Finding {
 
   equation(): EquationShown | undefined {
     const { point } = this.solution;
-    const { record, lines, lawNames } = point.runner;
+    const { record, lawNames } = point.runner;
     return {
       id: record.id,
       name: labelOf(record),
@@ -368,7 +372,7 @@ class FilmFinding implements Finding {
       confidence: record.confidence,
       note: record.note ?? "",
       propertiesAt: record.propertiesNote ?? record.propertiesAt,
-      lines: lines.filter((line) => lawNames.has(line.name)).map((line) => [line.name, printLine(line.node)] as const),
+      lines: point.runner.core.lines.filter((line) => lawNames.has(line.name)).map((line) => [line.name, printLine(line.node)] as const),
     };
   }
 }

@@ -1,28 +1,30 @@
 import { symbolMeaning } from "../correlations/symbols.js";
 import { printLine } from "../equations/rewrite.js";
 import { formatNumber, formatQuantity } from "../quantities/format.js";
-import type { Feed } from "../surfaces/runner.js";
+import { wholeValues } from "../surfaces/point.js";
 import type { Solution } from "../surfaces/solution.js";
 import type { Inputs, Surface } from "../surfaces/surface.js";
-import { fullCitation } from "./citation.js";
+import { fullCitation, shortCitation } from "./citation.js";
 import type { Step } from "./finding.js";
 
 /** Every step from the inputs to h, in the order it is worked out. */
 export function stepsOf(surface: Surface, inputs: Inputs, solution: Solution): readonly Step[] {
   const { point } = solution;
-  const { runner, values } = point;
+  const { runner } = point;
+  const { program, lines } = runner.whole();
+  const values = wholeValues(point);
   const meaningOf = (symbol: string): { meaning: string; unit: string } => {
     const own = runner.record.symbols?.[symbol];
     const argument = surface.arguments.find((one) => one.key === symbol);
     const known = symbolMeaning[symbol];
     return { meaning: known?.meaning ?? own ?? argument?.describe ?? symbol, unit: known?.unit ?? unitOf(argument?.dimensions[0]) };
   };
-  const steps: Step[] = runner.feeds.map((feed) => {
-    const symbol = runner.program.inputs.find((name) => runner.program.slot(name) === feed.slot) as string;
-    return { symbol, ...meaningOf(symbol), value: finite(values[feed.slot] as number), ...origin(feed, inputs, solution) };
+  const steps = program.inputs.map((symbol): Step => {
+    const value = values[program.slot(symbol)] as number;
+    return { symbol, ...meaningOf(symbol), value: finite(value), ...origin(symbol, inputs, solution) };
   });
-  for (const line of runner.lines) {
-    const value = values[runner.program.slot(line.name)] as number;
+  for (const line of lines) {
+    const value = values[program.slot(line.name)] as number;
     const isLaw = runner.lawNames.has(line.name);
     const replaced = point.atLimit && (isLaw || line.name === "Nu");
     steps.push({
@@ -49,19 +51,17 @@ function unitOf(dimension: string | undefined): string {
   return dimension === "length" ? "m" : dimension === "speed" ? "m/s" : "";
 }
 
-function origin(feed: Feed, inputs: Inputs, solution: Solution): { kind: Step["kind"]; note?: string; tolerance?: number } {
+const propertySymbol = /^(rho|cp|k|mu|beta)(_b|_w)?$/;
+
+/** Where an input of the algebra comes from, and of a property where it was taken and whose formulation it is. */
+function origin(symbol: string, inputs: Inputs, solution: Solution): { kind: Step["kind"]; note?: string; tolerance?: number } {
   const { point } = solution;
-  const { runner } = point;
-  const sources = inputs.fluid.sources.map((work) => fullCitation(work)).join("; ");
-  const at = (T: number): string =>
-    `${inputs.fluid.name} at ${formatQuantity(T, "temperature", "SI")}, ${formatQuantity(inputs.pressure, "pressure", "SI")}${sources === "" ? "" : `; ${sources}`}`;
-  switch (feed.from) {
-    case "property":
-      return { kind: "property", note: at(inputs.Tb + runner.fraction * (point.Ts - inputs.Tb)) };
-    case "bulk":
-      return { kind: "property", note: at(inputs.Tb) };
-    case "wall":
-      return { kind: "property", note: at(point.Ts) };
+  const property = propertySymbol.exec(symbol);
+  if (property !== null) {
+    const fraction = property[2] === "_b" ? 0 : property[2] === "_w" ? 1 : point.runner.fraction;
+    return { kind: "property", note: stateNote(inputs, inputs.Tb + fraction * (point.Ts - inputs.Tb)) };
+  }
+  switch (symbol) {
     case "Ts":
       return inputs.wall.kind === "flux"
         ? { kind: "solved", note: `found by the balance; residual ${formatNumber(solution.residual ?? 0)} W/m²` }
@@ -70,12 +70,18 @@ function origin(feed: Feed, inputs: Inputs, solution: Solution): { kind: Step["k
       return { kind: "input", ...tolerance(inputs, "bulk") };
     case "gravity":
     case "pressure":
-      return { kind: "setting", ...tolerance(inputs, feed.from) };
-    case "flux":
+      return { kind: "setting", ...tolerance(inputs, symbol) };
+    case "q_wall":
       return { kind: "input", ...tolerance(inputs, "surface") };
     default:
-      return { kind: "input", ...tolerance(inputs, feed.key) };
+      return { kind: "input", ...tolerance(inputs, symbol) };
   }
+}
+
+function stateNote(inputs: Inputs, T: number): string {
+  const sources = inputs.fluid.sources.map(shortCitation).join("; ");
+  const place = `${inputs.fluid.name} at ${formatQuantity(T, "temperature", "SI", 6)}, ${formatQuantity(inputs.pressure, "pressure", "SI", 6)}`;
+  return sources === "" ? place : `${place}; ${sources}`;
 }
 
 function tolerance(inputs: Inputs, key: string): { tolerance?: number } {

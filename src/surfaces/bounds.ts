@@ -1,7 +1,6 @@
 import { isProblem } from "../quantities/problems.js";
 import { candidatesFor, choose, decadesOutside } from "./choice.js";
-import { circumstancesOf, evaluateWith, type Nudge, type Point } from "./point.js";
-import { runnerOf } from "./runner.js";
+import { evaluate, nudgedCoefficient, type Point, type Setting, valueAt, withBuoyancy } from "./point.js";
 import { Scene } from "./scene.js";
 import { type Outcome, outcomeOf, type Solution, solve } from "./solution.js";
 import type { Inputs, Rival, Surface, Tolerance } from "./surface.js";
@@ -20,8 +19,6 @@ export interface Interval {
   readonly shares: readonly Share[];
 }
 
-const results = ["h", "Nu", "q", "Ts"] as const;
-
 /** Near the edge of its range, within this ratio, an equation's bounds reach to the equation that takes over. */
 const nearEdge = 1.1;
 
@@ -30,8 +27,7 @@ export function scatterAt(point: Point): number {
   const { scatter } = point.runner.record;
   let value = scatter.value;
   if (scatter.by !== undefined) {
-    const slot = point.runner.slot(scatter.by.symbol);
-    const at = slot === undefined ? Number.NaN : (point.values[slot] as number);
+    const at = valueAt(point, scatter.by.symbol);
     for (const [upTo, here] of scatter.by.steps) {
       if (at <= upTo) {
         value = here;
@@ -46,7 +42,7 @@ export function scatterAt(point: Point): number {
 export function boundsOf(surface: Surface, inputs: Inputs, solution: Solution): Interval {
   const nominal = outcomeOf(solution.point);
   const shares: Share[] = [
-    ...scatterShare(surface, inputs, solution.point, nominal),
+    ...scatterShare(solution.point, nominal),
     ...formulationShare(solution.point, nominal),
     ...inputs.tolerances.flatMap((tolerance) => toleranceShare(surface, inputs, tolerance, nominal)),
     ...profileShare(surface, inputs, nominal),
@@ -57,43 +53,60 @@ export function boundsOf(surface: Surface, inputs: Inputs, solution: Solution): 
     ...edgeShare(surface, inputs, solution.point, nominal),
     ...switchShare(surface, inputs, solution, nominal),
   ];
-  const worst = inputs.bounds === "worst";
-  const low: Record<string, number> = {};
-  const high: Record<string, number> = {};
-  for (const name of results) {
-    const below = together(shares, (share) => share.below[name], worst);
-    const above = together(shares, (share) => share.above[name], worst);
-    low[name] = nominal[name] - below;
-    high[name] = nominal[name] + above;
-  }
-  for (const name of ["h", "Nu"] as const) low[name] = Math.max(0, low[name] as number);
-  return { low: low as unknown as Outcome, high: high as unknown as Outcome, shares };
+  const combine = inputs.bounds === "worst" ? sumOf : quadratureOf;
+  const below = combine(shares, true);
+  const above = combine(shares, false);
+  return {
+    low: {
+      h: Math.max(0, nominal.h - below.h),
+      Nu: Math.max(0, nominal.Nu - below.Nu),
+      q: nominal.q - below.q,
+      Ts: nominal.Ts - below.Ts,
+    },
+    high: { h: nominal.h + above.h, Nu: nominal.Nu + above.Nu, q: nominal.q + above.q, Ts: nominal.Ts + above.Ts },
+    shares,
+  };
 }
 
-function together(shares: readonly Share[], of: (share: Share) => number, worst: boolean): number {
-  let sum = 0;
+function sumOf(shares: readonly Share[], downwards: boolean): Outcome {
+  let [h, Nu, q, Ts] = [0, 0, 0, 0];
   for (const share of shares) {
-    const part = of(share);
-    sum += worst ? part : part * part;
+    const part = downwards ? share.below : share.above;
+    h += part.h;
+    Nu += part.Nu;
+    q += part.q;
+    Ts += part.Ts;
   }
-  return worst ? sum : Math.sqrt(sum);
+  return { h, Nu, q, Ts };
 }
 
-function shareOf(cause: string, origin: string, nominal: Outcome, others: readonly Outcome[]): Share {
-  const below: Record<string, number> = {};
-  const above: Record<string, number> = {};
-  for (const name of results) {
-    let low = 0;
-    let high = 0;
-    for (const other of others) {
-      const change = other[name] - nominal[name];
-      if (change < low) low = change;
-      if (change > high) high = change;
-    }
-    below[name] = -low;
-    above[name] = high;
+function quadratureOf(shares: readonly Share[], downwards: boolean): Outcome {
+  let [h, Nu, q, Ts] = [0, 0, 0, 0];
+  for (const share of shares) {
+    const part = downwards ? share.below : share.above;
+    h += part.h * part.h;
+    Nu += part.Nu * part.Nu;
+    q += part.q * part.q;
+    Ts += part.Ts * part.Ts;
   }
-  return { cause, origin, below: below as unknown as Outcome, above: above as unknown as Outcome };
+  return { h: Math.sqrt(h), Nu: Math.sqrt(Nu), q: Math.sqrt(q), Ts: Math.sqrt(Ts) };
+}
+
+/** How far the other outcomes of one cause reach below and above the nominal one. */
+function shareOf(cause: string, origin: string, nominal: Outcome, others: readonly Outcome[]): Share {
+  const low = { h: 0, Nu: 0, q: 0, Ts: 0 };
+  const high = { h: 0, Nu: 0, q: 0, Ts: 0 };
+  for (const other of others) {
+    low.h = Math.max(low.h, nominal.h - other.h);
+    low.Nu = Math.max(low.Nu, nominal.Nu - other.Nu);
+    low.q = Math.max(low.q, nominal.q - other.q);
+    low.Ts = Math.max(low.Ts, nominal.Ts - other.Ts);
+    high.h = Math.max(high.h, other.h - nominal.h);
+    high.Nu = Math.max(high.Nu, other.Nu - nominal.Nu);
+    high.q = Math.max(high.q, other.q - nominal.q);
+    high.Ts = Math.max(high.Ts, other.Ts - nominal.Ts);
+  }
+  return { cause, origin, below: low, above: high };
 }
 
 /** A changed film coefficient at the same inputs: under a given flux the surface temperature answers to it. */
@@ -103,7 +116,7 @@ function scaled(point: Point, factor: number): Outcome {
   return isProblem(again) ? outcomeOf(point, factor) : outcomeOf(again.point, factor);
 }
 
-function scatterShare(_surface: Surface, _inputs: Inputs, point: Point, nominal: Outcome): Share[] {
+function scatterShare(point: Point, nominal: Outcome): Share[] {
   const { record } = point.runner;
   const scatter = scatterAt(point);
   if (scatter === 0) return [];
@@ -124,18 +137,12 @@ function formulationShare(point: Point, nominal: Outcome): Share[] {
   for (const property of formulated) {
     const part = uncertainty[property];
     if (!(part > 0)) continue;
-    const moved = nudged(point, { property, factor: 1 + part });
+    const moved = nudgedCoefficient(point, { property, factor: 1 + part });
     if (moved !== undefined && point.h > 0) squares += (moved / point.h - 1) ** 2;
   }
   if (squares === 0) return [];
   const relative = Math.sqrt(squares);
   return [shareOf("property formulation", uncertainty.origin, nominal, [scaled(point, 1 - relative), scaled(point, 1 + relative)])];
-}
-
-function nudged(point: Point, nudge: Nudge): number | undefined {
-  if (point.atLimit) return nudge.property === "conductivity" ? point.h * nudge.factor : undefined;
-  const moved = evaluateWith(point.surface, point.scene, point.at, point.runner, point.byDensities, nudge);
-  return isProblem(moved) ? undefined : moved.h;
 }
 
 /** The same inputs with one of them moved, SI. */
@@ -193,15 +200,12 @@ export function rivalsOf(point: Point): readonly Rival[] {
   return surface.rivals(point.at, (symbol) => valueAt(point, symbol), point.runner.record);
 }
 
-export function valueAt(point: Point, symbol: string): number {
-  const slot = point.runner.slot(symbol);
-  if (slot !== undefined) return point.values[slot] as number;
-  return point.scene.inputs.numbers[symbol] ?? Number.NaN;
+function settingAt(point: Point): Setting {
+  return { scene: point.scene, at: point.at, variant: point.variant };
 }
 
 function rivalShare(point: Point, rival: Rival, nominal: Outcome): Share[] {
-  const { variant } = circumstancesOf(point.surface, point.scene);
-  const other = evaluateWith(point.surface, point.scene, point.at, runnerOf(point.surface, rival.record, variant), point.byDensities);
+  const other = evaluate(point.surface, settingAt(point), rival.record);
   if (isProblem(other) || point.h === 0) return [];
   return [shareOf(rival.cause, rival.origin, nominal, [scaled(point, other.h / point.h)])];
 }
@@ -212,7 +216,7 @@ function limitShare(point: Point, nominal: Outcome): Share[] {
   if (!point.atLimit || limit === undefined) return [];
   const edge = ranges[limit.of]?.[0];
   if (edge === undefined) return [];
-  const { law } = point.runner;
+  const law = point.runner.law();
   const values = new Float64Array(law.size);
   for (const symbol of law.inputs) values[law.slot(symbol)] = symbol === limit.of ? edge : valueAt(point, symbol);
   law.run(values);
@@ -228,10 +232,8 @@ function limitShare(point: Point, nominal: Outcome): Share[] {
 }
 
 function buoyancyShare(point: Point, nominal: Outcome): Share[] {
-  if (!point.byDensities || point.h === 0) return [];
-  const { variant } = circumstancesOf(point.surface, point.scene);
-  const runner = runnerOf(point.surface, point.runner.record, { ...variant, buoyancy: "expansivity" });
-  const other = evaluateWith(point.surface, point.scene, point.at, runner, false);
+  if (point.variant.buoyancy !== "densities" || point.h === 0) return [];
+  const other = evaluate(point.surface, withBuoyancy(point.surface, settingAt(point), "expansivity"), point.runner.record);
   if (isProblem(other)) return [];
   return [shareOf("buoyancy by expansivity instead of by densities", "common practice", nominal, [scaled(point, other.h / point.h)])];
 }
@@ -255,14 +257,13 @@ function edgeShare(surface: Surface, inputs: Inputs, point: Point, nominal: Outc
   const candidates = candidatesFor(surface, point.at);
   if (isProblem(candidates)) return [];
   const list = candidates as readonly Point["runner"]["record"][];
-  const { variant } = circumstancesOf(surface, point.scene);
   const others: Outcome[] = [];
   for (const record of list) {
     if (record === point.runner.record) {
       if (!atEdge) break;
       continue;
     }
-    const other = evaluateWith(surface, point.scene, point.at, runnerOf(surface, record, variant), point.byDensities);
+    const other = evaluate(surface, settingAt(point), record);
     if (isProblem(other)) continue;
     const preferred = list.indexOf(record) < list.indexOf(point.runner.record);
     if (preferred && !other.inRange && justOutside(other)) others.push(scaled(point, other.h / point.h));

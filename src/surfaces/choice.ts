@@ -1,7 +1,6 @@
 import type { Correlation } from "../correlations/correlation.js";
 import { isProblem, type Problem, valueProblem } from "../quantities/problems.js";
-import { circumstancesOf, evaluateWith, type Point } from "./point.js";
-import { runnerOf } from "./runner.js";
+import { evaluate, type Point, settingOf } from "./point.js";
 import type { Scene } from "./scene.js";
 import type { Circumstances, Surface } from "./surface.js";
 
@@ -40,7 +39,8 @@ function isTakenUnasked(surface: Surface, record: Correlation): boolean {
 
 /** The preferred equation in range; failing that, the one that is least far outside. */
 export function choose(surface: Surface, scene: Scene): Point | Problem {
-  const { at, variant } = circumstancesOf(surface, scene);
+  const setting = settingOf(surface, scene);
+  const { at } = setting;
   const candidates = candidatesFor(surface, at);
   if (isProblem(candidates)) return candidates;
   let nearest: Point | undefined;
@@ -49,7 +49,7 @@ export function choose(surface: Surface, scene: Scene): Point | Problem {
   const asked = at.inputs.equation !== undefined || at.inputs.only !== undefined;
   for (const record of candidates as readonly Correlation[]) {
     if (!asked && !isTakenUnasked(surface, record)) continue;
-    const point = evaluateWith(surface, scene, at, runnerOf(surface, record, variant), variant.buoyancy === "densities");
+    const point = evaluate(surface, setting, record);
     if (isProblem(point)) {
       trouble ??= point;
       continue;

@@ -66,10 +66,18 @@ function roughScatter(record: Correlation): Correlation["scatter"] {
   return { ...scatter, by: { ...scatter.by, steps } };
 }
 
+const completedLists = new Map<string, readonly Correlation[]>();
+
 function candidates(at: Circumstances): readonly Correlation[] {
   const { numbers } = at.inputs;
   const rough = (numbers.sandRoughness ?? numbers.profileRoughness ?? 0) > 0;
-  return ordinary(at).map((record) => (record.id.startsWith("tube-default") ? completed(record, at.phase, rough) : record));
+  const key = `${at.phase === "liquid"}|${rough}|${at.wall}|${at.local}`;
+  let list = completedLists.get(key);
+  if (list === undefined) {
+    list = ordinary(at).map((record) => (record.id.startsWith("tube-default") ? completed(record, at.phase, rough) : record));
+    completedLists.set(key, list);
+  }
+  return list;
 }
 
 /** A wall rougher than this part of the diameter is no pipe: the unit was probably µm. */

@@ -16,10 +16,16 @@ function tiltOf(at: Circumstances): number {
   return at.inputs.numbers.slope ?? 0;
 }
 
+const standing = new Map<readonly Correlation[], readonly Correlation[]>();
+
 function candidates(at: Circumstances): readonly Correlation[] {
   const all = upright(at);
   const tilt = tiltOf(at);
-  if (tilt === 0) return all.filter((record) => !isTilted(record));
+  if (tilt === 0) {
+    const known = standing.get(all) ?? all.filter((record) => !isTilted(record));
+    standing.set(all, known);
+    return known;
+  }
   const looksUp = at.rising ? tilt > 0 : tilt < 0;
   return all.filter((record) => isTilted(record) && facing(record) !== (looksUp ? "down" : "up"));
 }

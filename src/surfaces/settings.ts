@@ -92,6 +92,14 @@ export const commonSettings: readonly SettingDefinition[] = [
   },
 ];
 
-export function settingsOf(surface: Surface | undefined): readonly SettingDefinition[] {
-  return surface === undefined ? commonSettings : [...commonSettings, ...surface.settings];
+const bySurface = new WeakMap<Surface, readonly SettingDefinition[]>();
+
+/** All settings that a function knows: the common ones, then the surface's own. */
+export function settingsOf(surface: Surface): readonly SettingDefinition[] {
+  let list = bySurface.get(surface);
+  if (list === undefined) {
+    list = [...commonSettings, ...surface.settings];
+    bySurface.set(surface, list);
+  }
+  return list;
 }

@@ -84,6 +84,8 @@ export interface Variant {
   readonly local: boolean;
   /** Optional numbers that the case gives, such as a length: lines may differ without them. */
   readonly given: ReadonlySet<string>;
+  /** All of the above as one text, under which compiled programs are kept. */
+  readonly key: string;
   /** Words of settings, for the few that change a line. */
   readonly words: Readonly<Record<string, string>>;
 }
