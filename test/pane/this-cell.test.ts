@@ -167,8 +167,8 @@ describe("errors say what to mend, and the offered change mends it", () => {
     ["a speed for a length", '=FILM.FREE.PLATE("air",80,20,"0.3 m/s")', /is a speed; a length is needed/],
     ["a misspelt fluid", '=FILM.FREE.PLATE("watr",60,20,0.3)', /watr/],
     ["a misspelt word", '=FILM.FREE.PLATE("air",80,20,0.3,"verdct")', /verdct/],
-    ["out of range", '=FILM.FREE.PLATE("water",60,20,30)', /is above 1e12/],
-    ["out of range, settings already there", '=2*FILM.FREE.PLATE("water",60,20,30,"h","pressure=2 bar")+1', /is above 1e12/],
+    ["out of range", '=FILM.FREE.PLATE("water",60,20,30)', /is above 10¹²/],
+    ["out of range, settings already there", '=2*FILM.FREE.PLATE("water",60,20,30,"h","pressure=2 bar")+1', /is above 10¹²/],
   ])("%s", async (_, formula, sentence) => {
     const { text, cell, explanation } = await shown({ A1: formula }, "A1");
     expect(text).toMatch(sentence);

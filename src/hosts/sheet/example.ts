@@ -9,6 +9,7 @@ export type StyleName =
   | "step"
   | "note"
   | "head"
+  | "headText"
   | "input"
   | "text"
   | "one"
@@ -40,8 +41,15 @@ export interface ExampleSheet {
 function line(from: string, style: StyleName, ...values: readonly (string | number | undefined)[]): readonly ExampleCell[] {
   const [, letter = "A", row = "1"] = /^([A-Z])(\d+)$/.exec(from) ?? [];
   return values.flatMap((value, i) =>
-    value === undefined ? [] : [{ at: `${String.fromCharCode(letter.charCodeAt(0) + i)}${row}`, value, style }],
+    value === undefined ? [] : [{ at: `${String.fromCharCode(letter.charCodeAt(0) + i)}${row}`, value, style: headed(style, value) }],
   );
+}
+
+const textColumns: ReadonlySet<unknown> = new Set(["verdict", "regime", "face", "part", "coolant"]);
+
+/** A head stands over its column as the column is aligned. */
+function headed(style: StyleName, value: string | number): StyleName {
+  return style === "head" && textColumns.has(value) ? "headText" : style;
 }
 
 /** Empty cells that a spilled block will fill, styled in advance: one style for each column. */
@@ -64,7 +72,7 @@ const heads = { h: "h [W/(m²·K)]", q: "q [W/m²]", reference: "reference tempe
 const startHere = sheet(
   {
     name: "Start here",
-    widths: [400, 96, 96, 112, 116, 84, 84, 96, 300],
+    widths: [400, 96, 96, 122, 122, 84, 84, 100, 300],
     heights: { 2: 42 },
     merged: ["A2:I2"],
   },
@@ -84,8 +92,8 @@ const startHere = sheet(
   line("B6", "two", '=FILM.FREE.PLATE("air",80,20,0.3,{"h","h low","h high","verdict"})'),
 
   line("A8", "step", "2  The header row of a table is its request"),
-  line("A9", "note", "Walls of the cabinet. The one formula in E10 answers the whole"),
-  line("A10", "note", "table; rows left blank stay blank until you fill them."),
+  line("A9", "note", "Walls. One formula, in E10, answers the whole table;"),
+  line("A10", "note", "rows left blank stay blank until you fill them."),
   line("B9", "head", "Ts [°C]", "Tb [°C]", "height [m]", heads.h, "h low", "h high", heads.q, "verdict"),
   line("B10", "input", 38, 20, 1.9),
   line("B11", "input", 45, 20, 1.9),
@@ -96,8 +104,8 @@ const startHere = sheet(
   line("E10", "two", '=FILM.FREE.PLATE("air",B10:B15,C10:C15,D10:D15,E9:I9)'),
 
   line("A17", "step", "3  Or one formula a row, to fill down"),
-  line("A18", "note", "Busbars, horizontal round bars. Drag the corner of E19 down"),
-  line("A19", "note", "to row 21."),
+  line("A18", "note", "Round busbars, horizontal. Fill them all:"),
+  line("A19", "note", "drag the corner of E19 down to E21"),
   line("B18", "head", "Ts [°C]", "Tb [°C]", "diameter [m]", heads.h),
   line("B19", "input", 65, 35, 0.012),
   line("B20", "input", 75, 35, 0.012),
@@ -125,7 +133,7 @@ const startHere = sheet(
   line("A33", "note", "A tolerance widens the bounds"),
   room("B33", 1, "two", "two", "two"),
   line("B33", "two", '=FILM.FREE.PLATE("air","80 ± 5 °C","20 ± 2 °C",0.3,{"h","h low","h high"})'),
-  line("A34", "note", "A speed where a length belongs is an error that says so"),
+  line("A34", "note", "A speed where a length belongs is refused"),
   line("B34", "two", '=FILM.FREE.PLATE("air",80,20,"0.3 m/s")'),
   line("C34", "words", "select B34 and read what to mend"),
   line("A35", "note", "Out of every published range there is no number"),

@@ -12,18 +12,23 @@ const line = 1;
 const wrapped = 3;
 const middle = 2;
 const left = 1;
+const right = 3;
 const rowsOfEach = 200;
 const columnsOfEach = 26;
 
 const ink = "#5b6470";
 const number = (pattern: string): Style => ({ n: { pattern } });
 
+const indented = { l: 8 };
+const headed: Style = { bl: yes, bg: { rgb: "#e8edf3" }, bd: { b: { s: line, cl: { rgb: "#8a96a3" } } } };
+
 const styles: Readonly<Record<StyleName, Style>> = {
   title: { bl: yes, fs: 16 },
   lead: { tb: wrapped, vt: middle, cl: { rgb: ink } },
   step: { bl: yes, fs: 12 },
   note: { cl: { rgb: ink } },
-  head: { bl: yes, bg: { rgb: "#e8edf3" }, bd: { b: { s: line, cl: { rgb: "#8a96a3" } } } },
+  head: { ...headed, ht: right },
+  headText: { ...headed, ht: left, pd: indented },
   input: { cl: { rgb: "#1b4fa0" }, bg: { rgb: "#f2f7ff" } },
   text: {},
   one: number("0.0"),
@@ -31,7 +36,7 @@ const styles: Readonly<Record<StyleName, Style>> = {
   three: number("0.000"),
   whole: number("0"),
   group: number("0.00E+00"),
-  words: { ht: left },
+  words: { ht: left, pd: indented },
 };
 
 export function exampleWorkbook(): WorkbookData {

@@ -293,29 +293,19 @@ export function groupsSection(steps: readonly Step[]): PageElement | undefined {
   return groups.length === 0 ? undefined : section("groups", words.groups.title, stepTable(groups));
 }
 
+/** The meaning heads the row: a symbol alone says nothing to a reader who hears the table. */
 function stepTable(steps: readonly Step[]): PageElement {
-  return el(
-    "table",
-    { class: "table steps" },
+  const heads = [words.table.symbol, words.table.meaning, words.table.value].map((head) => el("th", { scope: "col" }, head));
+  const rows = steps.map((one) =>
     el(
-      "thead",
-      { class: "unseen" },
-      el("tr", {}, ...[words.table.symbol, words.table.meaning, words.table.value].map((head) => el("th", { scope: "col" }, head))),
-    ),
-    el(
-      "tbody",
+      "tr",
       {},
-      ...steps.map((one) =>
-        el(
-          "tr",
-          {},
-          el("th", { scope: "row", class: "sym" }, typesetSymbol(one.symbol)),
-          el("td", { class: "meaning" }, one.meaning),
-          el("td", { class: "value" }, stepValue(one)),
-        ),
-      ),
+      el("td", { class: "sym" }, typesetSymbol(one.symbol)),
+      el("th", { scope: "row", class: "meaning" }, one.meaning),
+      el("td", { class: "value" }, stepValue(one)),
     ),
   );
+  return el("table", { class: "table steps" }, el("thead", { class: "unseen" }, el("tr", {}, ...heads)), el("tbody", {}, ...rows));
 }
 
 export function stepValue(step: Step): string {

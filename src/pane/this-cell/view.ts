@@ -3,7 +3,7 @@ import { answer } from "../../cells/answer.js";
 import { isErrorCell } from "../../cells/cell.js";
 import type { Explanation } from "../../cells/explanation.js";
 import type { ReadCall, ReadCell } from "../cell-reading.js";
-import { figure } from "../figures.js";
+import { figure, raisedPowers } from "../figures.js";
 import { type Child, el, type PageElement } from "../node.js";
 import { words } from "../words.js";
 import { type Mending, mendings } from "./mending.js";
@@ -146,7 +146,7 @@ function problemsSection(explanation: Explanation, mends: readonly Mending[], ac
   return section(
     "problems",
     words.problems.title,
-    el("ul", { class: "trouble-list", role: "alert" }, ...sentences),
+    el("div", { role: "alert" }, el("ul", { class: "trouble-list" }, ...sentences)),
     mends.length > 0 && el("p", { class: "small" }, words.problems.offer),
     mends.length > 0 &&
       el(
@@ -166,7 +166,7 @@ function problemsSection(explanation: Explanation, mends: readonly Mending[], ac
 
 function shortenedRefusal(explanation: Explanation): string {
   const h = explanation.finding?.word("h");
-  return typeof h === "object" && "sentence" in h ? h.sentence : (explanation.finding?.verdict ?? "");
+  return raisedPowers(typeof h === "object" && "sentence" in h ? h.sentence : (explanation.finding?.verdict ?? ""));
 }
 
 const mostRows = 60;

@@ -1,0 +1,154 @@
+// A real Chromium on the project's own server, for tests that do what a person does. Nothing but this machine may be asked for anything.
+import { type ChildProcess, spawn } from "node:child_process";
+import { existsSync, mkdirSync } from "node:fs";
+import { resolve } from "node:path";
+import { type Browser, type BrowserContextOptions, chromium, type Page } from "playwright-core";
+
+const executable = "/usr/bin/chromium";
+const root = resolve(import.meta.dirname, "../..");
+const screens = resolve(root, "test/screens");
+
+/** False where there is no browser: test/run.js says so loudly, and fails under CI. */
+export const hasBrowser = existsSync(executable);
+if (!hasBrowser && process.env.CI) throw new Error(`Chromium is not at ${executable}: under CI nothing may be left out.`);
+
+export interface Visit {
+  readonly page: Page;
+  /** Errors in the console, failures of scripts, requests that left the machine. */
+  readonly faults: string[];
+  close(): Promise<void>;
+}
+
+export class Place {
+  private constructor(
+    private readonly server: ChildProcess | undefined,
+    private readonly browser: Browser,
+    readonly address: string,
+  ) {}
+
+  static async open(): Promise<Place> {
+    const [{ server, address }, browser] = await Promise.all([
+      serve(),
+      chromium.launch({
+        executablePath: executable,
+        args: "--no-sandbox --disable-gpu --disable-quic --no-first-run --disable-background-networking --disable-component-update --disable-sync".split(
+          " ",
+        ),
+      }),
+    ]);
+    return new Place(server, browser, address);
+  }
+
+  async close(): Promise<void> {
+    await this.browser.close();
+    this.server?.kill();
+  }
+
+  async visit(path: string, options: BrowserContextOptions = {}): Promise<Visit> {
+    const context = await this.browser.newContext({ viewport: { width: 1400, height: 900 }, ...options });
+    await context.grantPermissions(["clipboard-read", "clipboard-write"]).catch(() => undefined);
+    const page = await context.newPage();
+    const faults: string[] = [];
+    page.on("console", (message) => {
+      if (message.type() === "error" || message.type() === "warning") faults.push(`console: ${message.text()} ${message.location().url}`);
+    });
+    page.on("pageerror", (error) => faults.push(`script: ${error.stack ?? error.message}`));
+    page.on("requestfailed", (request) => faults.push(`failed: ${request.url()} ${request.failure()?.errorText ?? ""}`));
+    const own = new URL(this.address).origin;
+    await context.route(
+      (url) => url.origin !== own && !["data:", "blob:"].includes(url.protocol),
+      (route) => {
+        faults.push(`left the machine: ${route.request().url()}`);
+        return route.abort();
+      },
+    );
+    await page.goto(new URL(path, this.address).href);
+    return { page, faults, close: () => context.close() };
+  }
+
+  /** The standalone sheet, ready to be typed into. */
+  async sheet(options: BrowserContextOptions = {}): Promise<Visit> {
+    const visit = await this.visit("sheet.html", options);
+    await ready(visit.page);
+    return visit;
+  }
+}
+
+export async function ready(page: Page): Promise<void> {
+  await page.waitForFunction(() => document.documentElement.dataset.ready === "true");
+  // The first calculation of the whole workbook.
+  await page.waitForTimeout(800);
+}
+
+/** The address that the server prints is the one to visit; FILMBOOK_ADDRESS names one that is already served. */
+function serve(): Promise<{ readonly server: ChildProcess | undefined; readonly address: string }> {
+  const served = process.env.FILMBOOK_ADDRESS;
+  if (served !== undefined) return Promise.resolve({ server: undefined, address: served });
+  const server = spawn(process.execPath, [resolve(root, "src/hosts/serve.js")], {
+    cwd: root,
+    env: { ...process.env, NO_OPEN: "1" },
+    stdio: ["ignore", "pipe", "pipe"],
+  });
+  return new Promise((done, failed) => {
+    let said = "";
+    const hear = (chunk: Buffer): void => {
+      said += chunk.toString();
+      const found = /https?:\/\/(?:127\.0\.0\.1|localhost)(?::\d+)?\/?/.exec(said);
+      if (found !== null) done({ server, address: found[0].endsWith("/") ? found[0] : `${found[0]}/` });
+    };
+    server.stdout?.on("data", hear);
+    server.stderr?.on("data", hear);
+    server.on("exit", (code) => failed(new Error(`the server ended with ${code}: ${said}`)));
+    server.on("error", failed);
+  });
+}
+
+/** Goes to a cell by the name box. */
+export async function goTo(page: Page, address: string): Promise<void> {
+  const box = page.locator('[data-u-comp="defined-name"] input');
+  await box.click();
+  await box.fill(address);
+  await box.press("Enter");
+  await page.waitForFunction((wanted) => (document.querySelector("#pane .where")?.textContent ?? "").includes(wanted), `!${address}`);
+}
+
+export async function openSheet(page: Page, name: string): Promise<void> {
+  await page.locator('[data-u-comp="slide-tab-item"]', { hasText: name }).first().click();
+  await page.waitForFunction(
+    (wanted) => (document.querySelector("#pane .where")?.textContent ?? "").includes(wanted),
+    name.includes(" ") ? `'${name}'!` : `${name}!`,
+  );
+}
+
+/** Types into a cell as a person does; the pause lets the suggestion list come and go. */
+export async function type(page: Page, address: string, text: string): Promise<void> {
+  await goTo(page, address);
+  await page.keyboard.type(text, { delay: 4 });
+  await page.waitForTimeout(250);
+  await page.keyboard.press("Tab");
+  await page.waitForTimeout(250);
+}
+
+export function paneText(page: Page): Promise<string> {
+  return page.locator("#pane").innerText();
+}
+
+/** What a cell shows: copied and read from the clipboard. */
+export async function cellShown(page: Page, address: string): Promise<string> {
+  const none = "nothing copied yet";
+  await goTo(page, address);
+  await page.evaluate((text) => navigator.clipboard.writeText(text), none);
+  for (let tries = 0; tries < 20; tries++) {
+    await page.keyboard.press("Control+c");
+    await page.waitForTimeout(60);
+    const text = await page.evaluate(() => navigator.clipboard.readText());
+    if (text !== none) return text.replace(/\r?\n$/, "");
+  }
+  throw new Error(`${address} could not be copied`);
+}
+
+export async function screenshot(page: Page, name: string, part?: string): Promise<void> {
+  mkdirSync(screens, { recursive: true });
+  const path = resolve(screens, `${name}.png`);
+  await (part === undefined ? page.screenshot({ path }) : page.locator(part).screenshot({ path }));
+}
