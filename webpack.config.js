@@ -25,7 +25,14 @@ const functions = {
   target: "es2020",
   entry: { functions: at("src/hosts/excel/functions.ts") },
   module: { rules: [typescript] },
-  output: { ...shared.output, chunkFormat: "array-push", chunkLoading: false, wasmLoading: false, globalObject: "globalThis", library: { name: "FilmbookFunctions", type: "var", export: "platformFunctions" } },
+  output: {
+    ...shared.output,
+    chunkFormat: "array-push",
+    chunkLoading: false,
+    wasmLoading: false,
+    globalObject: "globalThis",
+    library: { name: "FilmbookFunctions", type: "var", export: "platformFunctions" },
+  },
   plugins: [new MetadataPlugin({ source: at("src/cells/functions.ts"), bundle: "functions.js", library: "FilmbookFunctions" })],
 };
 
@@ -52,7 +59,12 @@ const pages = {
   output: { ...shared.output, filename: "[name].js", chunkFilename: "[name].js", assetModuleFilename: "assets/[name][ext]" },
   plugins: [
     new CssPlugin({ filename: "[name].css", chunkFilename: "[name].css", ignoreOrder: true }),
-    new HtmlPlugin({ filename: "taskpane.html", template: at("src/hosts/excel/taskpane.html"), chunks: ["taskpane"], scriptLoading: "defer" }),
+    new HtmlPlugin({
+      filename: "taskpane.html",
+      template: at("src/hosts/excel/taskpane.html"),
+      chunks: ["taskpane"],
+      scriptLoading: "defer",
+    }),
     new HtmlPlugin({ filename: "sheet.html", template: at("src/hosts/sheet/sheet.html"), chunks: ["sheet"], scriptLoading: "defer" }),
     new CopyPlugin({
       patterns: [

@@ -401,9 +401,6 @@ export const bibliography = {
   "iapws-r13-08": {
     cite: "IAPWS R13-08, Release on the IAPWS Formulation 2008 for the Thermodynamic Properties of Seawater, International Association for the Properties of Water and Steam, 2008",
   },
-  "iapws-r14-08": {
-    cite: "IAPWS R14-08(2011), Revised Release on the Pressure along the Melting and Sublimation Curves of Ordinary Water Substance, International Association for the Properties of Water and Steam, 2011",
-  },
   "iapws-r15-11": {
     cite: "IAPWS R15-11, Release on the IAPWS Formulation 2011 for the Thermal Conductivity of Ordinary Water Substance, International Association for the Properties of Water and Steam, 2011",
   },
@@ -942,10 +939,10 @@ export const bibliography = {
     cite: "M. Thol; E.W. Lemmon; R. Span, Equation of state for benzene for temperatures from the melting line up to 725 K with pressures up to 500 MPa, High Temperatures-High Pressures, vol. 41, 2012, p. 81-97",
   },
   "thol-2015-thesis": {
-    cite: "Monika Thol, Fundamental equation of state correlation for hexamethyldisiloxane based on experimental and molecular simulation data, Fluid Phase Equilib., 2015, doi:10.1016/j.fluid.2015.09.047; Monika Thol, Empirical Multiparameter Equations of State Based on Molecular Simulation and Hybrid Data Sets, Ruhr-Universität Bochum, 2015",
+    cite: "Monika Thol, Empirical Multiparameter Equations of State Based on Molecular Simulation and Hybrid Data Sets, Ruhr-Universität Bochum, 2015",
   },
   "thol-2016-fpe-mm": {
-    cite: "Monika Thol, Fundamental equation of state correlation for hexamethyldisiloxane based on experimental and molecular simulation data, Fluid Phase Equilib., 2015, doi:10.1016/j.fluid.2015.09.047; Monika Thol, Empirical Multiparameter Equations of State Based on Molecular Simulation and Hybrid Data Sets, Ruhr-Universität Bochum, 2015",
+    cite: "Monika Thol, Fundamental equation of state correlation for hexamethyldisiloxane based on experimental and molecular simulation data, Fluid Phase Equilib., 2015, doi:10.1016/j.fluid.2015.09.047",
   },
   "thol-2016-ijt-r1234zee": {
     cite: "Monika Thol; Eric W. Lemmon, Equation of State for the Thermodynamic Properties of trans-1,3,3,3-Tetrafluoropropene [R-1234ze(E)], Int. J. Thermophys, vol. 37, 2016, p. 1--16, doi:10.1007/s10765-016-2040-6",

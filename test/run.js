@@ -37,7 +37,16 @@ const folder = mkdtempSync(join(tmpdir(), "filmbook-"));
 const report = join(folder, "report.json");
 const vitest = join(dirname(require.resolve("vitest/package.json")), "vitest.mjs");
 const only = process.argv.slice(2);
-const args = [vitest, "run", "--config", "test/vitest.config.ts", "--reporter=dot", "--reporter=json", `--outputFile.json=${report}`, ...only];
+const args = [
+  vitest,
+  "run",
+  "--config",
+  "test/vitest.config.ts",
+  "--reporter=dot",
+  "--reporter=json",
+  `--outputFile.json=${report}`,
+  ...only,
+];
 const { status } = spawnSync(process.execPath, args, { cwd: root, stdio: "inherit" });
 if (!existsSync(report)) process.exit(status || 1);
 const { numPassedTests: passed, numFailedTests: failed, numPendingTests: skipped } = JSON.parse(readFileSync(report, "utf8"));

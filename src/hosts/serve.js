@@ -53,7 +53,11 @@ function handle(folder, request, response) {
     response.writeHead(404, { ...headers, "Content-Type": "text/plain; charset=utf-8" }).end("There is no such page here.\n");
     return;
   }
-  response.writeHead(200, { ...headers, "Content-Type": types[extname(file)] ?? "application/octet-stream", "Content-Length": statSync(file).size });
+  response.writeHead(200, {
+    ...headers,
+    "Content-Type": types[extname(file)] ?? "application/octet-stream",
+    "Content-Length": statSync(file).size,
+  });
   if (request.method === "HEAD") response.end();
   else createReadStream(file).pipe(response);
 }
