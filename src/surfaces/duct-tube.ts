@@ -18,11 +18,12 @@ const ordinary = serving("DUCT.TUBE", prefers);
 const corrected = new Map<string, Correlation>();
 
 /**
- * The default times its property ratio (liquids by the Prandtl numbers at bulk and wall, heated gases by the temperatures)
- * and, where the wall is rough, times what roughness gains: less than friction does, and no more beyond four times smooth friction.
+ * The default times its property ratio (liquids by the Prandtl numbers at bulk and wall; heated gases by the temperatures,
+ * in so far as the flow is turbulent: a laminar gas takes none) and, where the wall is rough, times what roughness gains: less than friction does, and no more beyond four times smooth friction.
  */
-function completed(record: Correlation, phase: Circumstances["phase"], rough: boolean): Correlation {
-  const ratio = correlationById(phase === "liquid" ? "property-liquid-pr" : "property-gas-temperature");
+function completed(record: Correlation, byPrandtl: boolean, rough: boolean): Correlation {
+  const ratio = correlationById(byPrandtl ? "property-liquid-pr" : "property-gas-temperature");
+  const factor = byPrandtl ? "Factor_ratio" : "(1+gamma_constant*(Factor_ratio-1))";
   const id = `${record.id}+${ratio.id}${rough ? "+norris-1971-rough" : ""}`;
   let made = corrected.get(id);
   if (made === undefined) {
@@ -39,7 +40,7 @@ function completed(record: Correlation, phase: Circumstances["phase"], rough: bo
       name: `${record.name}, with property ratio${rough ? " and roughness" : ""}`,
       parts: { constant: { of: record }, ratio: { of: ratio }, ...(rough ? roughParts : {}) },
       tables: undefined,
-      lines: { Nu: rough ? "Nu_constant*Factor_ratio*Factor_gain" : "Nu_constant*Factor_ratio" },
+      lines: { Nu: rough ? `Nu_constant*${factor}*Factor_gain` : `Nu_constant*${factor}` },
       ranges: { ...rangesOf(record), ...ratio.ranges, ...(rough ? { e_D: [0, roughest] as const } : {}) },
       scatter: rough ? roughScatter(record) : record.scatter,
       note: [record.note, `Property ratio: ${ratio.note ?? ratio.name}`, rough ? `Roughness: ${gain.note ?? gain.name}` : ""]
@@ -71,10 +72,12 @@ const completedLists = new Map<string, readonly Correlation[]>();
 function candidates(at: Circumstances): readonly Correlation[] {
   const { numbers } = at.inputs;
   const rough = (numbers.sandRoughness ?? numbers.profileRoughness ?? 0) > 0;
-  const key = `${at.phase === "liquid"}|${rough}|${at.wall}|${at.local}`;
+  // A table of one row says that properties are constant: its Prandtl ratio is 1 whatever the phase.
+  const byPrandtl = at.phase === "liquid" || at.inputs.fluid.constantDensity;
+  const key = `${byPrandtl}|${rough}|${at.wall}|${at.local}`;
   let list = completedLists.get(key);
   if (list === undefined) {
-    list = ordinary(at).map((record) => (record.id.startsWith("tube-default") ? completed(record, at.phase, rough) : record));
+    list = ordinary(at).map((record) => (record.id.startsWith("tube-default") ? completed(record, byPrandtl, rough) : record));
     completedLists.set(key, list);
   }
   return list;

@@ -116,7 +116,7 @@ describe.each(sweeps.map((sweep, i) => [`${i + 1} ${sweep.id} Pr ${sweep.Pr} ${s
 
 describe("every equation is found by its own label", () => {
   const circumstances = (): readonly Circumstances[] => {
-    const inputs = { numbers: {}, words: {} } as unknown as Inputs;
+    const inputs = { numbers: {}, words: {}, fluid: { constantDensity: false } } as unknown as Inputs;
     return (["isothermal", "uniform flux"] as const).flatMap((wall) =>
       [true, false].flatMap((rising) =>
         [true, false].map((local): Circumstances => ({ inputs, Ts: 300, rising, wall, local, phase: "gas" })),
