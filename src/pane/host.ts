@@ -21,6 +21,8 @@ export interface Selection {
   readonly place: Place;
   /** As the host writes it to a reader: "Walls!C4" or "C4". */
   readonly address: string;
+  /** All cells that are selected, where they are one block. */
+  readonly area?: Area;
   /** The formula in English with commas and decimal points, from "=" on; empty where the cell holds none. */
   readonly formula: string;
   /** What the cell shows, as text. */

@@ -1,12 +1,15 @@
 /** The frame of the pane: pages, the way between them, the theme. The host is only known by its few verbs. */
+import { cautionsPage } from "./cautions-page.js";
+import { newFormulaPage } from "./compose/page.js";
 import type { HostFacts, SheetHost } from "./host.js";
+import { libraryPage } from "./library/page.js";
 import { el } from "./node.js";
 import type { Errand, Frame, Page, PageId } from "./page.js";
 import { render, show } from "./render.js";
 import { thisCellPage } from "./this-cell/page.js";
 import { words } from "./words.js";
 
-export const allPages: readonly Page[] = [thisCellPage];
+export const allPages: readonly Page[] = [thisCellPage, newFormulaPage, libraryPage, cautionsPage];
 
 /** Opens the pane inside an element; the answer closes it. */
 export function openPane(root: HTMLElement, host: SheetHost, pages: readonly Page[] = allPages): () => void {

@@ -44,10 +44,19 @@ describe("selection", () => {
     expect(await host.selection()).toEqual({
       place: { sheet: "Walls", row: 3, column: 1 },
       address: "Walls!B4",
+      area: { sheet: "Walls", row: 3, column: 1, rows: 1, columns: 1 },
       formula: "",
       shown: "5",
       spill: { anchor: { sheet: "Walls", row: 1, column: 1 }, anchorAddress: "Walls!B2", formula: plate, rowOffset: 2, columnOffset: 0 },
     });
+  });
+
+  test("the selected block is known; of several blocks none", async () => {
+    const { host, standIn } = hosted();
+    standIn.book.selected = "A2:A4";
+    expect((await host.selection())?.area).toEqual({ sheet: "Walls", row: 1, column: 0, rows: 3, columns: 1 });
+    standIn.book.selected = "several";
+    expect(await host.selection()).not.toHaveProperty("area");
   });
 
   test("the anchor itself is no part of another's block", async () => {

@@ -13,6 +13,8 @@ export interface StandInCell {
 export interface StandInBook {
   readonly sheets: Record<string, Record<string, StandInCell>>;
   active: { sheet: string; cell: string };
+  /** The selected block around the active cell; "several" for a selection of several blocks. */
+  selected?: string;
   readonly names?: Readonly<Record<string, string | number>>;
   readonly tables?: Readonly<Record<string, Readonly<Record<string, string>>>>;
   /** Areas that a formula spills into, by its address "Sheet!A1". */
@@ -125,6 +127,10 @@ export class StandIn {
     });
     return {
       getActiveCell: () => this.range(this.boxOf(`${book.active.sheet}!${book.active.cell}`)),
+      getSelectedRange: () => {
+        if (book.selected === "several") throw new Error("InvalidSelection: The current selection is invalid for this operation.");
+        return this.range(this.boxOf(`${book.active.sheet}!${book.selected ?? book.active.cell}`));
+      },
       application: this.proxy({ decimalSeparator: () => book.decimalSeparator ?? "." }, {}),
       names: { getItemOrNullObject: (name: string) => this.named(name) },
       tables: { getItemOrNullObject: (name: string) => this.table(name) },

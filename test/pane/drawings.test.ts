@@ -32,6 +32,7 @@ describe("axes", () => {
   test("marks are round and few", () => {
     expect(marks({ scale: "log", from: 0.05, to: 2e12 }, 5)).toEqual([1, 1e3, 1e6, 1e9, 1e12]);
     expect(marks({ scale: "linear", from: 0, to: 7 }, 5)).toEqual([0, 2, 4, 6]);
+    expect(marks({ scale: "linear", from: 1e20, to: 1e20 + 65536 }, 5)).toEqual([]);
     expect(axisAround([4.4, 5.8], true)).toEqual({ scale: "linear", from: 0, to: 6 });
   });
 });

@@ -43,10 +43,12 @@ export class ExcelHost implements SheetHost {
       parent?.load("address,rowIndex,columnIndex,formulas");
       await context.sync();
       const place = { sheet: cell.worksheet.name, row: cell.rowIndex, column: cell.columnIndex };
+      const area = await selectedArea(context, place.sheet);
       const spill = parent === undefined || parent.isNullObject ? undefined : spillOf(parent, place);
       return {
         place,
         address: cell.address,
+        ...(area === undefined ? {} : { area }),
         formula: formulaIn(cell.formulas[0]?.[0]),
         shown: cell.text[0]?.[0] ?? "",
         ...(spill === undefined ? {} : { spill }),
@@ -202,6 +204,18 @@ export class ExcelHost implements SheetHost {
       sheet.getRangeByIndexes(place.row, place.column, 1, 1).select();
       await context.sync();
     });
+  }
+}
+
+/** Several blocks at once are no range that one argument could take: the host then refuses to name one. */
+async function selectedArea(context: ExcelContext, sheet: string): Promise<Area | undefined> {
+  try {
+    const range = context.workbook.getSelectedRange();
+    range.load("rowIndex,columnIndex,rowCount,columnCount");
+    await context.sync();
+    return { sheet, row: range.rowIndex, column: range.columnIndex, rows: range.rowCount, columns: range.columnCount };
+  } catch {
+    return undefined;
   }
 }
 

@@ -27,6 +27,8 @@ export interface MaybeNull extends Loaded {
 
 export interface Workbook {
   getActiveCell(): CellRange;
+  /** Fails where several blocks are selected at once. */
+  getSelectedRange(): CellRange;
   readonly application: Loaded & { readonly decimalSeparator: string };
   readonly worksheets: Worksheets;
   readonly names: { getItemOrNullObject(name: string): NamedItem };

@@ -58,9 +58,15 @@ export class UniverHost implements SheetHost {
     if (sheet === undefined || cell === null || cell === undefined) return Promise.resolve(undefined);
     const place: Place = { sheet: sheet.getSheetName(), row: cell.getRow(), column: cell.getColumn() };
     const spill = this.spillAt(sheet, place);
+    const range = sheet.getActiveRange();
+    const area =
+      range === null
+        ? undefined
+        : { sheet: place.sheet, row: range.getRow(), column: range.getColumn(), rows: range.getHeight(), columns: range.getWidth() };
     return Promise.resolve({
       place,
       address: addressOf(place),
+      ...(area === undefined ? {} : { area }),
       formula: this.formulaAt(sheet, place.row, place.column),
       shown: String(this.valueAt(sheet, place.row, place.column) ?? ""),
       ...(spill === undefined ? {} : { spill }),

@@ -26,6 +26,8 @@ export function marks(axis: Axis, most: number): readonly number[] {
 function linearMarks({ from, to }: Axis, most: number): readonly number[] {
   const step = roundStep((to - from) / Math.max(1, most - 1));
   const found: number[] = [];
+  // Where the axis is shorter than the digits of its ends can tell, there are no round values on it.
+  if (!(Math.abs(from) / step < 1e9 && Math.abs(to) / step < 1e9)) return found;
   for (let i = Math.ceil(from / step - 1e-9); i * step <= to + step * 1e-9; i++) found.push(Number((i * step).toPrecision(12)));
   return found;
 }
