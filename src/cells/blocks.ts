@@ -62,7 +62,7 @@ export function allBlock(finding: Finding, system: "SI" | "US", words: readonly 
   for (const word of words) {
     if (word.kind === "block") continue;
     const value = finding.word(word.name);
-    if (isProblem(value) && value.fault === "value") continue;
+    if (isProblem(value) && (finding.answered || value.fault === "value")) continue;
     const unit = typeof value === "string" || isProblem(value) ? "" : defaultUnit(value.dimension, system).symbol;
     rows.push([word.name, render(value, system), unit]);
   }

@@ -100,7 +100,7 @@ export const churchillOzoe1973FluxLocal: Correlation = {
 
 export const churchillOzoe1973FluxMean: Correlation = {
   id: "churchill-ozoe-1973-flux-mean",
-  name: "Uniform flux, laminar, q over the mean difference",
+  name: "Churchill & Ozoe, laminar, uniform flux, q over the mean difference",
   serves: ["FORCED.PLATE"],
   result: "Nu",
   extent: "mean",
@@ -121,7 +121,7 @@ export const churchillOzoe1973FluxMean: Correlation = {
 
 export const kaysFluxLocal0453: Correlation = {
   id: "kays-flux-local-0453",
-  name: "Uniform flux, laminar, local, constant 0.453 (superseded)",
+  name: "Kays & Crawford, laminar, uniform flux, local, constant 0.453 (superseded)",
   serves: ["FORCED.PLATE"],
   result: "Nu",
   extent: "local",
@@ -236,7 +236,7 @@ export const colburn1933PlateMeanTripped: Correlation = {
 
 export const colburn1933PlateMixed: Correlation = {
   id: "colburn-1933-plate-mixed",
-  name: "Laminar then turbulent, transition at Re 5e5",
+  name: "Colburn, laminar then turbulent, transition at Re 5e5",
   serves: ["FORCED.PLATE"],
   result: "Nu",
   extent: "mean",
@@ -254,7 +254,7 @@ export const colburn1933PlateMixed: Correlation = {
 
 export const colburn1933PlateMixedGeneral: Correlation = {
   id: "colburn-1933-plate-mixed-general",
-  name: "Laminar then turbulent, stated transition",
+  name: "Colburn, laminar then turbulent, stated transition",
   serves: ["FORCED.PLATE"],
   result: "Nu",
   extent: "mean",
@@ -498,7 +498,7 @@ export const churchill1976PlateMean: Correlation = {
 
 export const kaysTurbulentFluxLocal: Correlation = {
   id: "kays-turbulent-flux-local",
-  name: "Uniform flux, turbulent, local",
+  name: "Kays & Crawford, turbulent, uniform flux, local",
   serves: ["FORCED.PLATE"],
   result: "Nu",
   extent: "local",

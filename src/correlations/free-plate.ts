@@ -338,7 +338,7 @@ export const fujiiFujii1976PlateFluxLocal: Correlation = {
 
 export const fujiiFujii1976PlateFluxMean: Correlation = {
   id: "fujii-fujii-1976-plate-flux-mean",
-  name: "Uniform flux, laminar, q over the mean difference",
+  name: "Fujii & Fujii, uniform flux, laminar, q over the mean difference",
   serves: ["FREE.PLATE"],
   result: "Nu",
   extent: "mean",

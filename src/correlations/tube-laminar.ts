@@ -154,7 +154,7 @@ export const siederTate1936Laminar: Correlation = {
 
 export const gnielinskiTubeTMeanThermal: Correlation = {
   id: "gnielinski-tube-T-mean-thermal",
-  name: "Composite of developed and Lévêque limits, tube, uniform temperature, mean",
+  name: "Gnielinski, composite of developed and Lévêque limits, tube, uniform temperature, mean",
   serves: ["DUCT.TUBE"],
   set: "Gnielinski, laminar tube, uniform temperature",
   result: "Nu",
@@ -176,7 +176,7 @@ export const gnielinskiTubeTMeanThermal: Correlation = {
 
 export const gnielinskiTubeTMeanSimultaneous: Correlation = {
   id: "gnielinski-tube-T-mean-simultaneous",
-  name: "Composite with simultaneous entry, tube, uniform temperature, mean",
+  name: "Gnielinski, composite with simultaneous entry, tube, uniform temperature, mean",
   serves: ["DUCT.TUBE"],
   set: "Gnielinski, laminar tube, uniform temperature",
   result: "Nu",
@@ -199,7 +199,7 @@ export const gnielinskiTubeTMeanSimultaneous: Correlation = {
 
 export const gnielinskiTubeHLocal: Correlation = {
   id: "gnielinski-tube-H-local",
-  name: "Composite of developed and Lévêque limits, tube, uniform flux, local",
+  name: "Gnielinski, composite of developed and Lévêque limits, tube, uniform flux, local",
   serves: ["DUCT.TUBE"],
   result: "Nu",
   extent: "local",
@@ -220,7 +220,7 @@ export const gnielinskiTubeHLocal: Correlation = {
 
 export const gnielinskiTubeHMean: Correlation = {
   id: "gnielinski-tube-H-mean",
-  name: "Composite, tube, uniform flux, mean",
+  name: "Gnielinski, composite, tube, uniform flux, mean",
   serves: ["DUCT.TUBE"],
   set: "Gnielinski, laminar tube, uniform flux, length average",
   result: "Nu",
@@ -242,7 +242,7 @@ export const gnielinskiTubeHMean: Correlation = {
 
 export const gnielinskiTubeHMeanSimultaneous: Correlation = {
   id: "gnielinski-tube-H-mean-simultaneous",
-  name: "Composite with simultaneous entry, tube, uniform flux, mean",
+  name: "Gnielinski, composite with simultaneous entry, tube, uniform flux, mean",
   serves: ["DUCT.TUBE"],
   set: "Gnielinski, laminar tube, uniform flux, length average",
   result: "Nu",
@@ -327,7 +327,7 @@ export const baehrStephanTubeTMean: Correlation = {
 
 export const gnielinskiTubeTLocal: Correlation = {
   id: "gnielinski-tube-T-local",
-  name: "Composite of developed and Lévêque limits, tube, uniform temperature, local",
+  name: "Gnielinski, composite of developed and Lévêque limits, tube, uniform temperature, local",
   serves: ["DUCT.TUBE"],
   result: "Nu",
   extent: "local",
@@ -348,7 +348,7 @@ export const gnielinskiTubeTLocal: Correlation = {
 
 export const levequeTubeHMean: Correlation = {
   id: "leveque-tube-H-mean",
-  name: "Composite of developed and Lévêque limits, tube, uniform flux, q over the mean difference",
+  name: "Gnielinski, composite of developed and Lévêque limits, tube, uniform flux, q over the mean difference",
   serves: ["DUCT.TUBE"],
   result: "Nu",
   extent: "mean",

@@ -17,10 +17,10 @@ export function serving(id: string, first: readonly string[]): (at: Circumstance
     return place >= 0 ? place : first.length + confidenceOrder[record.confidence];
   };
   const ordered = all.map((record, i) => ({ record, i })).sort((a, b) => rank(a.record) - rank(b.record) || a.i - b.i);
-  const cache = new Map<string, readonly Correlation[]>();
+  const cache: (readonly Correlation[] | undefined)[] = [];
   return (at) => {
-    const key = `${at.wall}|${at.local}`;
-    let list = cache.get(key);
+    const place = (at.wall === "uniform flux" ? 1 : 0) + (at.local ? 2 : 0);
+    let list = cache[place];
     if (list === undefined) {
       const extent = at.local ? "local" : "mean";
       const here = ordered.map((one) => one.record).filter((record) => record.extent === extent || record.extent === "either");
@@ -28,7 +28,7 @@ export function serving(id: string, first: readonly string[]): (at: Circumstance
         ...here.filter((record) => record.wall === at.wall || record.wall === "either"),
         ...(at.wall === "uniform flux" ? here.filter((record) => record.wall === "isothermal") : []),
       ];
-      cache.set(key, list);
+      cache[place] = list;
     }
     return list;
   };

@@ -67,18 +67,19 @@ function roughScatter(record: Correlation): Correlation["scatter"] {
   return { ...scatter, by: { ...scatter.by, steps } };
 }
 
-const completedLists = new Map<string, readonly Correlation[]>();
+// Sixteen lists at most, by what the four circumstances say; a column asks for the same one row after row.
+const completedLists: (readonly Correlation[] | undefined)[] = [];
 
 function candidates(at: Circumstances): readonly Correlation[] {
-  const { numbers } = at.inputs;
+  const { numbers, fluid } = at.inputs;
   const rough = (numbers.sandRoughness ?? numbers.profileRoughness ?? 0) > 0;
   // A table of one row says that properties are constant: its Prandtl ratio is 1 whatever the phase.
-  const byPrandtl = at.phase === "liquid" || at.inputs.fluid.constantDensity;
-  const key = `${byPrandtl}|${rough}|${at.wall}|${at.local}`;
-  let list = completedLists.get(key);
+  const byPrandtl = at.phase === "liquid" || fluid.constantDensity;
+  const place = (byPrandtl ? 1 : 0) + (rough ? 2 : 0) + (at.wall === "uniform flux" ? 4 : 0) + (at.local ? 8 : 0);
+  let list = completedLists[place];
   if (list === undefined) {
     list = ordinary(at).map((record) => (record.id.startsWith("tube-default") ? completed(record, byPrandtl, rough) : record));
-    completedLists.set(key, list);
+    completedLists[place] = list;
   }
   return list;
 }
