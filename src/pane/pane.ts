@@ -29,7 +29,9 @@ class Pane {
     private readonly pages: readonly Page[],
   ) {
     root.classList.add("pane");
-    this.content = render(el("div", { class: "page", id: "page" })) as HTMLElement;
+    this.content = render(
+      el("div", { class: "page", id: "page", role: "region", "aria-labelledby": "page-title", tabindex: 0 }),
+    ) as HTMLElement;
     this.says = render(el("p", { class: "says", role: "status" })) as HTMLElement;
     if (pages.length > 1) root.replaceChildren(render(this.head()), this.content, this.says);
     else root.replaceChildren(this.content, this.says);

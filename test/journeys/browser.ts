@@ -121,12 +121,17 @@ export async function openSheet(page: Page, name: string): Promise<void> {
 }
 
 /** Types into a cell as a person does; the pause lets the suggestion list come and go. */
+/** Types into a cell as a person would; on a busy machine the suggestion list may swallow a key, and a person would type again. */
 export async function type(page: Page, address: string, text: string): Promise<void> {
-  await goTo(page, address);
-  await page.keyboard.type(text, { delay: 4 });
-  await page.waitForTimeout(250);
-  await page.keyboard.press("Tab");
-  await page.waitForTimeout(250);
+  for (let tries = 0; tries < 3; tries++) {
+    await goTo(page, address);
+    await page.keyboard.type(text, { delay: 8 });
+    await page.waitForTimeout(350);
+    await page.keyboard.press("Tab");
+    await page.waitForTimeout(300);
+    if ((await cellShown(page, address)) !== "") return;
+    await page.keyboard.press("Escape");
+  }
 }
 
 export function paneText(page: Page): Promise<string> {
@@ -145,6 +150,24 @@ export async function cellShown(page: Page, address: string): Promise<string> {
     if (text !== none) return text.replace(/\r?\n$/, "");
   }
   throw new Error(`${address} could not be copied`);
+}
+
+interface AxeResult {
+  readonly violations: readonly {
+    readonly id: string;
+    readonly nodes: readonly { readonly html: string; readonly failureSummary?: string }[];
+  }[];
+}
+
+/** What axe finds in the parts of the page that are ours; the embedded grid is its makers'. */
+export async function axeFinds(page: Page, source: string): Promise<readonly string[]> {
+  await page.evaluate(source);
+  const result = (await page.evaluate(() =>
+    (globalThis as unknown as { axe: { run(where: unknown): Promise<unknown> } }).axe.run({
+      include: [["#pane"], [".bar"], ["#separator"]],
+    }),
+  )) as AxeResult;
+  return result.violations.flatMap((one) => one.nodes.map((node) => `${one.id}: ${node.html.slice(0, 160)} ${node.failureSummary ?? ""}`));
 }
 
 export async function screenshot(page: Page, name: string, part?: string): Promise<void> {

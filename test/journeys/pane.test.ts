@@ -3,27 +3,9 @@ import { readFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import type { Page } from "playwright-core";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
-import { goTo, hasBrowser, openSheet, Place, screenshot, type Visit } from "./browser.js";
+import { axeFinds, goTo, hasBrowser, openSheet, Place, screenshot, type Visit } from "./browser.js";
 
 const axeSource = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
-
-interface AxeResult {
-  readonly violations: readonly {
-    readonly id: string;
-    readonly nodes: readonly { readonly html: string; readonly failureSummary?: string }[];
-  }[];
-}
-
-/** What axe finds in the parts of the page that are ours; the embedded grid is its makers'. */
-async function axeFinds(page: Page): Promise<readonly string[]> {
-  await page.evaluate(axeSource);
-  const result = (await page.evaluate(() =>
-    (globalThis as unknown as { axe: { run(where: unknown): Promise<unknown> } }).axe.run({
-      include: [["#pane"], [".bar"], ["#separator"]],
-    }),
-  )) as AxeResult;
-  return result.violations.flatMap((one) => one.nodes.map((node) => `${one.id}: ${node.html.slice(0, 160)} ${node.failureSummary ?? ""}`));
-}
 
 describe.runIf(hasBrowser)("the pane", () => {
   let place: Place;
@@ -52,7 +34,7 @@ describe.runIf(hasBrowser)("the pane", () => {
     await openSheet(page, sheet);
     await goTo(page, cell);
     await page.waitForTimeout(250);
-    expect(await axeFinds(page)).toEqual([]);
+    expect(await axeFinds(page, axeSource)).toEqual([]);
   });
 
   test("symbols tell what they are on hover, and the arrow keys move among them", async () => {

@@ -54,7 +54,7 @@ describe.runIf(hasBrowser)("the standalone sheet", () => {
   test("words in braces spill to the right, and a cell of the block knows its word", async () => {
     const { page } = visit;
     await type(page, "B43", '=FILM.FREE.PLATE("air",80,20,0.3,{"h","Ra","verdict"})');
-    await expect.poll(() => cellShown(page, "D43"), { timeout: 8000 }).toBe("in range");
+    await expect.poll(() => cellShown(page, "D43"), { timeout: 30_000, interval: 500 }).toBe("in range");
     await goTo(page, "C43");
     expect(await paneText(page)).toMatch(/Ra:\s*1\.07/);
     expect(await paneText(page)).toContain("part of the block");

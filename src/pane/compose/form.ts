@@ -118,7 +118,7 @@ export function formulaText(form: Form): string {
 
 function argumentTexts(form: Form, signature: Signature): readonly string[] {
   const texts = signature.parameters.map((one) => {
-    if (one.key === "give") return form.giveFrom === "" ? giveText(form.give) : form.giveFrom;
+    if (one.key === "give") return form.giveFrom === "" ? giveText(form.give, wordOtherwise(form.functionId)) : form.giveFrom;
     if (one.key === "settings") return form.settingsFrom === "" ? settingsText(form.settings) : form.settingsFrom;
     return boxText(form.boxes[one.name] ?? { typed: "", unit: "" }, dimensionsOf(form.functionId, one.name), systemOf(form));
   });
@@ -130,8 +130,27 @@ function quoted(text: string): string {
   return `"${text.replace(/"/g, '""')}"`;
 }
 
-function giveText(words: readonly string[]): string {
-  if (words.length === 0 || (words.length === 1 && words[0] === "h")) return "";
+/** What a function returns when no word is asked for; undefined where that is a whole block. */
+function wordOtherwise(functionId: string): string | undefined {
+  return surfaceById(functionId) === undefined ? undefined : "h";
+}
+
+/** The words that are chosen, the one that comes by itself among them. */
+export function wordsChosen(form: Form): readonly string[] {
+  const otherwise = wordOtherwise(form.functionId);
+  return form.give.length > 0 || otherwise === undefined ? form.give : [otherwise];
+}
+
+/** Words to choose from at once; any other may be added. */
+export function commonWords(functionId: string): readonly string[] {
+  return functionId === "FLUID" ? fluidCommon : surfaceCommon;
+}
+
+const surfaceCommon = ["h", "h low", "h high", "q", "Ts", "Ra", "Re", "verdict"] as const;
+const fluidCommon = ["density", "cp", "conductivity", "viscosity", "Pr", "phase", "verdict"] as const;
+
+function giveText(words: readonly string[], otherwise: string | undefined): string {
+  if (words.length === 0 || (words.length === 1 && words[0] === otherwise)) return "";
   return words.length === 1 ? quoted(words[0] as string) : `{${words.map(quoted).join(",")}}`;
 }
 
@@ -250,7 +269,12 @@ export function tableCells(form: Form, variation: Variation, at: Place): readonl
     return undefined;
   const columns = boxedParameters(signature).filter((one) => one.name !== "fluid" && (form.boxes[one.name]?.typed.trim() ?? "") !== "");
   if (!columns.some((one) => one.name === variation.name)) return undefined;
-  const words = form.give.length === 0 ? ["h", "h low", "h high", "verdict"] : form.give;
+  const words =
+    form.give.length > 0
+      ? form.give
+      : wordOtherwise(form.functionId) === undefined
+        ? ["density", "verdict"]
+        : ["h", "h low", "h high", "verdict"];
   const cellsOf = (parameter: Parameter, row: number): Written => {
     const box = form.boxes[parameter.name] as Box;
     if (parameter.name !== variation.name) return inCell(box, dimensionsOf(form.functionId, parameter.name), systemOf(form));

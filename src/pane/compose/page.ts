@@ -10,7 +10,7 @@ import { cellName, columnLetters, sheetPrefix } from "../reference.js";
 import { show } from "../render.js";
 import { signatureOf } from "../signature.js";
 import { words } from "../words.js";
-import { type Form, formOfCall, formulaText, freshForm, tableCells, type Variation } from "./form.js";
+import { type Form, formOfCall, formulaText, freshForm, tableCells, type Variation, wordsChosen } from "./form.js";
 import { askView, chooserBody, chooserHead, faultId, formView, liveView } from "./view.js";
 
 const pause = 120;
@@ -138,7 +138,7 @@ class Composer {
   }
 
   private toggleWord(word: string): void {
-    const chosen = this.formNow.give.length === 0 ? ["h"] : this.formNow.give;
+    const chosen = wordsChosen(this.formNow);
     this.change({ give: chosen.includes(word) ? chosen.filter((one) => one !== word) : [...chosen, word] });
   }
 
@@ -146,7 +146,7 @@ class Composer {
     const box = this.frame.content.querySelector<HTMLInputElement>("#more-word");
     const word = box?.value.trim() ?? "";
     if (word === "") return;
-    const chosen = this.formNow.give.length === 0 ? ["h"] : this.formNow.give;
+    const chosen = wordsChosen(this.formNow);
     this.redraw({ give: [...new Set([...chosen, word])] }, "more-word");
   }
 

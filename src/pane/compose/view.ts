@@ -8,7 +8,18 @@ import { type Child, el, type PageElement } from "../node.js";
 import { type Parameter, type Signature, signatureOf } from "../signature.js";
 import { verdictSection } from "../this-cell/sections.js";
 import { words } from "../words.js";
-import { boxedParameters, dimensionsOf, type Form, settingsKnown, systemOf, takes, unitsFor, type Variation } from "./form.js";
+import {
+  boxedParameters,
+  commonWords,
+  dimensionsOf,
+  type Form,
+  settingsKnown,
+  systemOf,
+  takes,
+  unitsFor,
+  type Variation,
+  wordsChosen,
+} from "./form.js";
 
 const { compose: says } = words;
 
@@ -206,8 +217,8 @@ function boxField(form: Form, parameter: Parameter, actions: FormActions): PageE
 }
 
 function giveSection(form: Form, actions: FormActions): PageElement {
-  const all = [...new Set([...says.commonWords, ...form.give])];
-  const chosen = form.give.length === 0 ? ["h"] : form.give;
+  const chosen = wordsChosen(form);
+  const all = [...new Set([...commonWords(form.functionId), ...chosen])];
   return el(
     "section",
     { class: "part", "aria-labelledby": "compose-give" },

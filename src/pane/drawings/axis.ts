@@ -1,5 +1,7 @@
 /** A straight axis, linear or logarithmic: where a value lies on it, and where its marks stand. */
 
+import { figure, raisedPowers } from "../figures.js";
+
 export interface Axis {
   readonly scale: "linear" | "log";
   readonly from: number;
@@ -44,6 +46,12 @@ function logMarks({ from, to }: Axis, most: number): readonly number[] {
   const found: number[] = [];
   for (let power = Math.ceil(first / step) * step; power <= last; power += step) found.push(Number(`1e${power}`));
   return found;
+}
+
+/** A mark as it is printed: on a logarithmic axis powers of ten from 10⁴ and below 10⁻³ on. */
+export function markText(axis: Axis, value: number): string {
+  const isFar = axis.scale === "log" && Math.abs(Math.log10(value)) >= 3.5;
+  return isFar ? raisedPowers(value.toExponential()) : figure(value);
 }
 
 /** A linear axis that holds all values, with round ends. */

@@ -1,9 +1,9 @@
 /** A range strip: the published interval of one group, and where the case lies in it. A pure model, then a drawing of it. */
 import type { RangeTest } from "../../findings/finding.js";
-import { figure, raisedPowers } from "../figures.js";
+import { figure } from "../figures.js";
 import { type PageElement, svg } from "../node.js";
 import { words } from "../words.js";
-import { along, type Axis, marks } from "./axis.js";
+import { along, type Axis, marks, markText } from "./axis.js";
 
 export interface Strip {
   readonly axis: Axis;
@@ -32,14 +32,10 @@ export function stripOf(test: RangeTest): Strip {
     within: test.within,
     marks: marks(axis, mostMarks).map((value) => ({
       at: along(axis, value),
-      text: axis.scale === "log" ? powerOfTen(value) : figure(value),
+      text: markText(axis, value),
     })),
     says: words.ranges.sentence(test.symbol, figure(test.value), figure(test.low), figure(test.high), test.within, test.source),
   };
-}
-
-function powerOfTen(value: number): string {
-  return Math.abs(Math.log10(value)) < 3.5 ? figure(value) : raisedPowers(value.toExponential());
 }
 
 /** Logarithmic where the interval spans more than a decade and a half, or is open, and everything is above zero. */

@@ -69,7 +69,8 @@ export function searched(all: Library, search: string): Library {
   const wanted = search.trim().toLowerCase().split(/\s+/);
   // "R-134a", "R 134a" and "R134a" are one name.
   const bare = (text: string): string => text.replace(/[-\s]/g, "");
-  const holds = ({ text }: { readonly text: string }): boolean => wanted.every((word) => text.includes(word) || bare(text).includes(bare(word)));
+  const holds = ({ text }: { readonly text: string }): boolean =>
+    wanted.every((word) => text.includes(word) || bare(text).includes(bare(word)));
   return { surfaces: all.surfaces.filter(holds), functions: all.functions.filter(holds), fluids: all.fluids.filter(holds) };
 }
 
@@ -135,7 +136,10 @@ function statesOf(fluid: Fluid): readonly State[] {
   const [from, to] = high < usual[0] || low > usual[1] ? [low, high] : [Math.max(low, usual[0]), Math.min(high, usual[1])];
   const coarse = singles(fluid, from, to);
   const distance = (state: State): number => Math.abs(state.T - room);
-  const nearest = coarse.reduce<State | undefined>((best, state) => (best === undefined || distance(state) < distance(best) ? state : best), undefined);
+  const nearest = coarse.reduce<State | undefined>(
+    (best, state) => (best === undefined || distance(state) < distance(best) ? state : best),
+    undefined,
+  );
   const alike = coarse.filter((state) => (state.phase === "liquid") === (nearest?.phase === "liquid"));
   const [first, last] = [alike[0], alike[alike.length - 1]];
   if (first === undefined || last === undefined) return [];

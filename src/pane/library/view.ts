@@ -4,10 +4,10 @@ import { fullCitation } from "../../findings/citation.js";
 import type { ShelfEntry } from "../../fluids/shelf-entry.js";
 import { formatNumber, formatQuantity } from "../../quantities/format.js";
 import type { Surface } from "../../surfaces/surface.js";
-import { along, type Axis, marks } from "../drawings/axis.js";
+import { along, type Axis, marks, markText } from "../drawings/axis.js";
 import { plotDrawing } from "../drawings/plot.js";
 import { surfaceDrawing } from "../drawings/surfaces.js";
-import { figure } from "../figures.js";
+import { figure, raisedPowers } from "../figures.js";
 import { type Child, el, type PageElement, svg } from "../node.js";
 import type { Signature } from "../signature.js";
 import { words } from "../words.js";
@@ -187,7 +187,7 @@ function rangesChart(equations: readonly Correlation[]): PageElement | undefined
       }),
     ),
     ...marks(axis, 5).map((value) =>
-      svg("text", { class: "strip-text", x: percent(along(axis, value)), y: height - 4, "text-anchor": "middle" }, figure(value)),
+      svg("text", { class: "strip-text", x: percent(along(axis, value)), y: height - 4, "text-anchor": "middle" }, markText(axis, value)),
     ),
   );
 }
@@ -220,7 +220,7 @@ function fluidEntry(fluid: ShelfEntry, state: LibraryState, actions: LibraryActi
           [says.also, fluid.synonyms.join(", ")],
           [
             says.range,
-            `${range}; ${formatQuantity(fluid.range.p[0], "pressure", "SI")} to ${formatQuantity(fluid.range.p[1], "pressure", "SI")}`,
+            `${range}; ${raisedPowers(formatQuantity(fluid.range.p[0], "pressure", "SI"))} to ${raisedPowers(formatQuantity(fluid.range.p[1], "pressure", "SI"))}`,
           ],
           [says.uncertainty, fluid.uncertainty],
           [says.source, fluid.sources.map((work) => fullCitation(work)).join("; ")],
