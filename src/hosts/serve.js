@@ -1,8 +1,9 @@
 // npm start: builds where the build is missing or older than the sources, then serves the standalone sheet to this machine only.
 import { spawnSync } from "node:child_process";
-import { createReadStream, existsSync, readdirSync, statSync } from "node:fs";
+import { createReadStream, existsSync, readdirSync, readFileSync, statSync } from "node:fs";
 import { createServer } from "node:http";
 import { dirname, extname, join, normalize, resolve, sep } from "node:path";
+import { pipeline } from "node:stream";
 import { fileURLToPath } from "node:url";
 
 const root = resolve(dirname(fileURLToPath(import.meta.url)), "../..");
@@ -26,19 +27,32 @@ const headers = {
   "X-Content-Type-Options": "nosniff",
   "Referrer-Policy": "no-referrer",
   "Cross-Origin-Opener-Policy": "same-origin",
+  "Cross-Origin-Resource-Policy": "same-origin",
   "Cache-Control": "no-cache",
 };
 
-/** The file that a request asks for, or undefined where it leaves the folder or there is none. */
-function fileOf(folder, url) {
-  let path;
+/** For a page that declares no policy of its own: nothing may load. */
+const noPolicy = "default-src 'none'; base-uri 'none'; form-action 'none'";
+
+/** The policy that a page declares in its head, so that the header and the page cannot disagree. */
+function policyOf(file) {
+  const declared = /<meta\s+http-equiv="Content-Security-Policy"\s+content="([^"]+)"/i.exec(readFileSync(file, "utf8"));
+  return declared?.[1] ?? noPolicy;
+}
+
+/** The decoded path of a request, or undefined where it cannot be read. */
+function pathOf(url) {
   try {
-    path = decodeURIComponent(new URL(url, "http://localhost").pathname);
+    const path = decodeURIComponent(new URL(url, "http://localhost").pathname);
+    return path.includes("\0") ? undefined : path;
   } catch {
     return undefined;
   }
-  if (path.includes("\0")) return undefined;
-  const file = normalize(join(folder, path === "/" ? "sheet.html" : path));
+}
+
+/** The file that a path leads to, or undefined where it leaves the folder or there is none. */
+function fileOf(folder, path) {
+  const file = normalize(join(folder, path));
   if (!file.startsWith(resolve(folder) + sep)) return undefined;
   return existsSync(file) && statSync(file).isFile() ? file : undefined;
 }
@@ -48,29 +62,48 @@ function handle(folder, request, response) {
     response.writeHead(405, { ...headers, Allow: "GET, HEAD" }).end();
     return;
   }
-  const file = fileOf(folder, request.url ?? "/");
+  const path = pathOf(request.url ?? "/");
+  if (path === "/") {
+    response.writeHead(302, { ...headers, Location: "/sheet.html" }).end();
+    return;
+  }
+  const file = path === undefined ? undefined : fileOf(folder, path);
   if (file === undefined) {
     response.writeHead(404, { ...headers, "Content-Type": "text/plain; charset=utf-8" }).end("There is no such page here.\n");
     return;
   }
+  const kind = extname(file);
   response.writeHead(200, {
     ...headers,
-    "Content-Type": types[extname(file)] ?? "application/octet-stream",
+    ...(kind === ".html" ? { "Content-Security-Policy": policyOf(file) } : {}),
+    "Content-Type": types[kind] ?? "application/octet-stream",
     "Content-Length": statSync(file).size,
   });
   if (request.method === "HEAD") response.end();
-  else createReadStream(file).pipe(response);
+  // A rebuild may take the file away while it is read: that ends one answer, not the server.
+  else pipeline(createReadStream(file), response, () => undefined);
+}
+
+/** Listens on one port of the loopback address; false where another program has it. */
+function listen(server, port) {
+  return new Promise((done, failed) => {
+    server.once("error", (fault) => (fault.code === "EADDRINUSE" ? done(false) : failed(fault)));
+    server.listen(port, "127.0.0.1", () => done(true));
+  });
+}
+
+function close(server) {
+  return new Promise((done) => {
+    server.close(done);
+    server.closeAllConnections();
+  });
 }
 
 /** Serves a folder on the loopback address, on the first free port from the one asked for. */
 export async function serve({ port = firstPort, folder = join(root, "dist") } = {}) {
   for (let tried = port; tried < port + portsTried; tried++) {
     const server = createServer((request, response) => handle(folder, request, response));
-    const free = await new Promise((done) => {
-      server.once("error", () => done(false));
-      server.listen(tried, "127.0.0.1", () => done(true));
-    });
-    if (free) return { port: tried, close: () => new Promise((done) => server.close(done)) };
+    if (await listen(server, tried)) return { port: tried, close: () => close(server) };
   }
   throw new Error(`no free port from ${port} to ${port + portsTried - 1}`);
 }
