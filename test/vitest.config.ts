@@ -9,6 +9,6 @@ export default defineConfig({
     maxWorkers: 2,
     testTimeout: 60_000,
     hookTimeout: 180_000,
-    reporters: ["dot"],
+    reporters: ["default"],
   },
 });
