@@ -4,7 +4,7 @@ import { mkdtempSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join, resolve } from "node:path";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
-import { disagreements, exportedFunctions, readMetadata } from "../../src/hosts/build/metadata-plugin.js";
+import { disagreements, exportedFunctions, readMetadata, strayExports } from "../../src/hosts/build/metadata-plugin.js";
 
 const metadata = (...ids: readonly string[]) => ({ functions: ids.map((id) => ({ id })) });
 const associate = (...pairs: readonly (readonly [string, string])[]) => pairs.map(([id, functionName]) => ({ id, functionName }));
@@ -52,6 +52,24 @@ describe("exportedFunctions", () => {
   });
 });
 
+describe("strayExports", () => {
+  test.each([
+    "export const arrow = () => 1;",
+    'export { x } from "./x.js";',
+    'export * from "./x.js";',
+    "export default function () {}",
+    "export function* many() {}",
+  ])("%s has no id", (line) => {
+    expect(strayExports(`export function a() {}\n${line}\nexport async function b() {}\n`)).toEqual([
+      `"${line}" is no top-level function declaration, so it has no id`,
+    ]);
+  });
+
+  test("declarations are none, nor is a comment", () => {
+    expect(strayExports("export function a(\n  x,\n) {}\nexport async function b() {}\n// export const c = 1;\n")).toEqual([]);
+  });
+});
+
 describe("readMetadata", () => {
   let folder: string;
   beforeAll(() => {
@@ -93,5 +111,6 @@ describe("readMetadata", () => {
     const exported = exportedFunctions(readFileSync(path, "utf8"));
     expect(exported).toHaveLength(read.metadata.functions.length);
     expect(disagreements(read.metadata, read.associate, exported)).toEqual([]);
+    expect(strayExports(readFileSync(path, "utf8"))).toEqual([]);
   });
 });

@@ -35,6 +35,12 @@ export function exportedFunctions(text) {
   return [...text.matchAll(/^export (?:async )?function (\w+)/gm)].map((match) => match[1]);
 }
 
+/** Exports of any other form: the generator passes them over in silence, so they would be functions without an id. */
+export function strayExports(text) {
+  const lines = [...text.matchAll(/^export (?!(?:async )?function \w)(.*)$/gm)];
+  return lines.map((match) => `"export ${match[1].trim()}" is no top-level function declaration, so it has no id`);
+}
+
 export class MetadataPlugin {
   constructor({ source, bundle, library }) {
     Object.assign(this, { source, bundle, library });
@@ -48,7 +54,7 @@ export class MetadataPlugin {
         try {
           const { metadata, associate } = await readMetadata(this.source);
           const text = compiler.inputFileSystem.readFileSync(this.source, "utf8").toString();
-          const faults = disagreements(metadata, associate, exportedFunctions(text));
+          const faults = [...disagreements(metadata, associate, exportedFunctions(text)), ...strayExports(text)];
           if (faults.length > 0) throw new Error(faults.join("; "));
           compilation.emitAsset("functions.json", new sources.RawSource(`${JSON.stringify(metadata, null, 1)}\n`));
           const pairs = associate.map((one) => `${JSON.stringify(one.id)}:${this.library}.${one.functionName}`);
