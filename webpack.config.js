@@ -42,7 +42,8 @@ const officeFiles = [
   "o15apptofilemappingtable.js",
   "excel-*.js",
   "custom-functions-runtime.js",
-  "en-us/*.js",
+  // Words in the host's language: where they are missing, a failed request stands before the English ones.
+  "*-*/office_strings.js",
   "ariatelemetry/*.js",
   "telemetry/*.js",
 ];
