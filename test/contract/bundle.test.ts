@@ -1,10 +1,28 @@
 // What the platform sees: metadata that agrees with the bundle, and functions that answer every way of calling them with
 // a proper block. Fails on an id without function, an illegal name, NaN, null, an exception, or an error without a sentence.
 import { describe, expect, test } from "vitest";
-import { loadBundle, PlatformError, type PlatformFunction } from "./bundle.js";
+import { ErrorCode, loadBundle, loadText, PlatformError, type PlatformFunction, runIn } from "./bundle.js";
 
-const { functions, metadata } = loadBundle();
+const { functions, metadata, realm, text } = loadBundle();
 const entries = metadata.functions.map((one) => [one.id, one] as const);
+
+describe("realm", () => {
+  test("has no page, no Office, no Node, and evaluates no text", () => {
+    for (const name of ["document", "window", "self", "Office", "Excel", "require", "process", "fetch", "setTimeout"])
+      expect(runIn(realm, `typeof ${name}`), name).toBe("undefined");
+    expect(() => runIn(realm, 'eval("1 + 1")')).toThrow(/Code generation from strings disallowed/);
+    expect(() => runIn(realm, 'new Function("return 1")')).toThrow(/Code generation from strings disallowed/);
+  });
+
+  test("gains one name of ours, and the file itself evaluates no text", () => {
+    expect(runIn(realm, "Object.keys(globalThis)")).toEqual(["CustomFunctions", "FilmbookFunctions"]);
+    expect(text).not.toMatch(/\beval\s*\(|\bnew\s+Function\b|\bimportScripts\b|\bimport\s*\(/);
+  });
+
+  test("a function that fails to load would be noticed: without the platform there is an error", () => {
+    expect(() => loadText(text, {})).toThrow(/CustomFunctions/);
+  });
+});
 
 describe("metadata", () => {
   test("ids and functions are the same set", () => {
@@ -15,7 +33,8 @@ describe("metadata", () => {
 
   test.each(entries)("%s has a legal name, help, and matrices throughout", (_, entry) => {
     expect(entry.name).toMatch(/^[A-Z][A-Z0-9._]{2,127}$/);
-    expect(entry.name).not.toMatch(/^[A-Z]{1,3}\d+$/); // would look like a cell
+    expect(entry.name).not.toMatch(/^[A-Z]{1,3}\d+$|^R\d*C\d*$/); // would look like a cell, A1 or R1C1
+    expect(entry.id).toBe(entry.name);
     expect(entry.description.length).toBeGreaterThan(10);
     expect(entry.description.length).toBeLessThan(200);
     expect(entry.result.dimensionality).toBe("matrix");
@@ -23,7 +42,9 @@ describe("metadata", () => {
     for (const parameter of entry.parameters) {
       expect(parameter.type).toBe("any");
       expect(parameter.dimensionality).toBe("matrix");
+      expect(parameter.name).toMatch(/^[a-z][A-Za-z]*$/);
       expect(parameter.description?.length ?? 0).toBeGreaterThan(1);
+      expect(parameter.description?.length ?? 0).toBeLessThan(200);
       if (optional) expect(parameter.optional).toBe(true);
       optional ||= parameter.optional === true;
     }
@@ -36,11 +57,14 @@ const errorCell = { code: "#DIV/0!" };
 function checked(cells: unknown[][]): unknown[][] {
   expect(Array.isArray(cells)).toBe(true);
   expect(cells.length).toBeGreaterThan(0);
+  expect(cells[0]?.length).toBeGreaterThan(0);
   for (const row of cells) {
     expect(row.length).toBe(cells[0]?.length);
     for (const cell of row) {
       if (typeof cell === "number") expect(Number.isFinite(cell)).toBe(true);
       else if (cell instanceof PlatformError) {
+        expect(Object.values(ErrorCode)).toContain(cell.code);
+        // The platform shows a message with these two alone; an error cell passed on brings none of ours.
         if (cell.code === "#VALUE!" || cell.code === "#N/A") expect(cell.message?.length ?? 0).toBeGreaterThan(10);
       } else expect(["string", "boolean"]).toContain(typeof cell);
     }
@@ -57,12 +81,15 @@ describe.each(entries)("FILM.%s called as the platform calls", (id, entry) => {
     ["blank texts", [...all([[""]]), invocation]],
     ["blank zeros", [...all([[0]]), invocation]],
     ["blank nulls", [...all([[null]]), invocation]],
-    ["a scalar in each", [...all([["x"]]), invocation]],
+    ["a text in each", [...all([["x"]]), invocation]],
     ["numbers in each", [...all([[1]]), invocation]],
     ["error cells", [...all([[errorCell]]), invocation]],
     ["booleans", [...all([[true]]), invocation]],
     ["blocks that do not fit", [...all([[1, 2, 3]]).map((block, i) => (i % 2 === 0 ? block : [[1], [2]])), invocation]],
-    ["too few arguments", []],
+    ["no argument at all", []],
+    ["the last argument missing", all([["x"]]).slice(0, -1)],
+    ["arguments missing after the first", [[["air"]]]],
+    ["undefined in each", [...all(undefined), invocation]],
     ["more than it declares", [...all(null), invocation, "more", 7]],
     ["long columns", [...all(Array.from({ length: 50 }, (_, i) => [i])), invocation]],
   ])("%s", (_, args) => {

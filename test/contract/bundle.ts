@@ -13,7 +13,7 @@ export class PlatformError {
   ) {}
 }
 
-const ErrorCode = {
+export const ErrorCode = {
   invalidValue: "#VALUE!",
   notAvailable: "#N/A",
   divisionByZero: "#DIV/0!",
@@ -25,21 +25,42 @@ const ErrorCode = {
 
 export type PlatformFunction = (...args: unknown[]) => unknown[][];
 
-export function loadBundle(): { readonly functions: Readonly<Record<string, PlatformFunction>>; readonly metadata: Metadata } {
+export interface Bundle {
+  readonly functions: Readonly<Record<string, PlatformFunction>>;
+  readonly metadata: Metadata;
+  readonly realm: vm.Context;
+  readonly text: string;
+}
+
+export function loadBundle(): Bundle {
   const bundle = join(root, "dist/functions.js");
-  if (!existsSync(bundle)) {
-    const { status } = spawnSync(process.execPath, [join(root, "src/hosts/build/build.js")], { stdio: "inherit" });
-    if (status !== 0) throw new Error("the build failed");
-  }
+  if (!existsSync(bundle)) build();
   const functions: Record<string, PlatformFunction> = {};
   const CustomFunctions = {
     associate: (map: Record<string, PlatformFunction>) => Object.assign(functions, map),
     Error: PlatformError,
     ErrorCode,
   };
-  const realm = vm.createContext({ CustomFunctions }, { codeGeneration: { strings: false, wasm: false } });
-  vm.runInContext(readFileSync(bundle, "utf8"), realm, { filename: "functions.js" });
-  return { functions, metadata: JSON.parse(readFileSync(join(root, "dist/functions.json"), "utf8")) as Metadata };
+  const text = readFileSync(bundle, "utf8");
+  const realm = loadText(text, { CustomFunctions });
+  return { functions, metadata: JSON.parse(readFileSync(join(root, "dist/functions.json"), "utf8")) as Metadata, realm, text };
+}
+
+/** Runs the text of a bundle in a realm of its own that has only what is given. */
+export function loadText(text: string, given: Readonly<Record<string, unknown>>): vm.Context {
+  const realm = vm.createContext({ ...given }, { codeGeneration: { strings: false, wasm: false } });
+  vm.runInContext(text, realm, { filename: "functions.js" });
+  return realm;
+}
+
+export function runIn(realm: vm.Context, line: string): unknown {
+  const value: unknown = vm.runInContext(line, realm);
+  return Array.isArray(value) ? [...value] : value;
+}
+
+function build(): void {
+  const { status } = spawnSync(process.execPath, [join(root, "src/hosts/build/build.js")], { stdio: "inherit" });
+  if (status !== 0) throw new Error("the build failed");
 }
 
 export interface Metadata {
