@@ -1,4 +1,4 @@
-// A small reader of formulas for tests: numbers, texts, array constants and omitted arguments of one FILM call.
+// A small reader of formulas for tests: numbers, texts, array constants, ranges of a grid and omitted arguments of one FILM call.
 import { readFileSync } from "node:fs";
 import { join, resolve } from "node:path";
 
@@ -16,18 +16,31 @@ export function formulasIn(text: string): readonly string[] {
   return [...text.matchAll(/`(=FILM\.[^`]+)`/g)].map((match) => match[1] as string);
 }
 
-export function runFormula<T>(formula: string, call: (id: string, args: readonly (unknown[][] | null)[]) => T): T {
+/** Cells from A1 on; a blank is null, as in a saved workbook. */
+export type Grid = readonly (readonly unknown[])[];
+
+export function runFormula<T>(formula: string, call: (id: string, args: readonly (unknown[][] | null)[]) => T, grid?: Grid): T {
   const match = /^=FILM\.([A-Z.]+)\(([\s\S]*)\)$/.exec(formula);
   if (match === null) throw new Error(`not one FILM call: ${formula}`);
-  return call(match[1] as string, splitOutside(match[2] as string, ",").map(readArgument));
+  return call(
+    match[1] as string,
+    splitOutside(match[2] as string, ",").map((text) => readArgument(text, grid)),
+  );
 }
 
-function readArgument(text: string): unknown[][] | null {
+function readArgument(text: string, grid: Grid | undefined): unknown[][] | null {
   const trimmed = text.trim();
   if (trimmed === "") return null;
+  const range = /^([A-Z])(\d+)(?::([A-Z])(\d+))?$/.exec(trimmed);
+  if (range !== null && grid !== undefined) return cellsOf(range, grid);
   if (trimmed.startsWith("{"))
     return splitOutside(trimmed.slice(1, -1), ";").map((row) => splitOutside(row, ",").map((one) => readScalar(one.trim())));
   return [[readScalar(trimmed)]];
+}
+
+function cellsOf([, left, top, right = left, bottom = top]: readonly (string | undefined)[], grid: Grid): unknown[][] {
+  const columnOf = (letter: string | undefined): number => (letter ?? "").charCodeAt(0) - "A".charCodeAt(0);
+  return grid.slice(Number(top) - 1, Number(bottom)).map((row) => row.slice(columnOf(left), columnOf(right) + 1));
 }
 
 function readScalar(text: string): unknown {
