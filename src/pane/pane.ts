@@ -8,8 +8,9 @@ import type { Errand, Frame, Page, PageId } from "./page.js";
 import { render, show } from "./render.js";
 import { thisCellPage } from "./this-cell/page.js";
 import { words } from "./words.js";
+import { workbookPage } from "./workbook/page.js";
 
-export const allPages: readonly Page[] = [thisCellPage, newFormulaPage, libraryPage, cautionsPage];
+export const allPages: readonly Page[] = [thisCellPage, newFormulaPage, libraryPage, workbookPage, cautionsPage];
 
 /** Opens the pane inside an element; the answer closes it. */
 export function openPane(root: HTMLElement, host: SheetHost, pages: readonly Page[] = allPages): () => void {

@@ -1,8 +1,11 @@
 // A real Chromium on the project's own server, for tests that do what a person does. Nothing but this machine may be asked for anything.
-import { type ChildProcess, spawn } from "node:child_process";
 import { existsSync, mkdirSync } from "node:fs";
 import { resolve } from "node:path";
 import { type Browser, type BrowserContextOptions, chromium, type Page } from "playwright-core";
+import { expect } from "vitest";
+
+/** Waits until it is so; a busy machine takes its time. */
+export const patiently = <T>(read: () => T) => expect.poll(read, { timeout: 30_000, interval: 150 });
 
 const executable = "/usr/bin/chromium";
 const root = resolve(import.meta.dirname, "../..");
@@ -21,14 +24,13 @@ export interface Visit {
 
 export class Place {
   private constructor(
-    private readonly server: ChildProcess | undefined,
+    private readonly server: Server,
     private readonly browser: Browser,
-    readonly address: string,
   ) {}
 
   static async open(): Promise<Place> {
-    const [{ server, address }, browser] = await Promise.all([
-      serve(),
+    const [server, browser] = await Promise.all([
+      served(),
       chromium.launch({
         executablePath: executable,
         args: "--no-sandbox --disable-gpu --disable-quic --no-first-run --disable-background-networking --disable-component-update --disable-sync".split(
@@ -36,12 +38,12 @@ export class Place {
         ),
       }),
     ]);
-    return new Place(server, browser, address);
+    return new Place(server, browser);
   }
 
   async close(): Promise<void> {
     await this.browser.close();
-    this.server?.kill();
+    await this.server.close();
   }
 
   async visit(path: string, options: BrowserContextOptions = {}): Promise<Visit> {
@@ -54,7 +56,7 @@ export class Place {
     });
     page.on("pageerror", (error) => faults.push(`script: ${error.stack ?? error.message}`));
     page.on("requestfailed", (request) => faults.push(`failed: ${request.url()} ${request.failure()?.errorText ?? ""}`));
-    const own = new URL(this.address).origin;
+    const own = new URL(this.server.address).origin;
     await context.route(
       (url) => url.origin !== own && !["data:", "blob:"].includes(url.protocol),
       (route) => {
@@ -62,7 +64,7 @@ export class Place {
         return route.abort();
       },
     );
-    await page.goto(new URL(path, this.address).href);
+    await page.goto(new URL(path, this.server.address).href);
     return { page, faults, close: () => context.close() };
   }
 
@@ -80,27 +82,19 @@ export async function ready(page: Page): Promise<void> {
   await page.waitForTimeout(800);
 }
 
-/** The address that the server prints is the one to visit; FILMBOOK_ADDRESS names one that is already served. */
-function serve(): Promise<{ readonly server: ChildProcess | undefined; readonly address: string }> {
-  const served = process.env.FILMBOOK_ADDRESS;
-  if (served !== undefined) return Promise.resolve({ server: undefined, address: served });
-  const server = spawn(process.execPath, [resolve(root, "src/hosts/serve.js")], {
-    cwd: root,
-    env: { ...process.env, NO_OPEN: "1" },
-    stdio: ["ignore", "pipe", "pipe"],
-  });
-  return new Promise((done, failed) => {
-    let said = "";
-    const hear = (chunk: Buffer): void => {
-      said += chunk.toString();
-      const found = /https?:\/\/(?:127\.0\.0\.1|localhost)(?::\d+)?\/?/.exec(said);
-      if (found !== null) done({ server, address: found[0].endsWith("/") ? found[0] : `${found[0]}/` });
-    };
-    server.stdout?.on("data", hear);
-    server.stderr?.on("data", hear);
-    server.on("exit", (code) => failed(new Error(`the server ended with ${code}: ${said}`)));
-    server.on("error", failed);
-  });
+interface Server {
+  readonly address: string;
+  close(): Promise<unknown>;
+}
+
+/** The project's own server over the build that stands there; FILMBOOK_ADDRESS names one that is already served. */
+async function served(): Promise<Server> {
+  const given = process.env.FILMBOOK_ADDRESS;
+  if (given !== undefined) return { address: given, close: () => Promise.resolve() };
+  const module = new URL("../../src/hosts/serve.js", import.meta.url).href;
+  const { serve } = (await import(module)) as { serve(): Promise<{ readonly port: number; close(): Promise<unknown> }> };
+  const { port, close } = await serve();
+  return { address: `http://127.0.0.1:${port}/`, close };
 }
 
 /** Goes to a cell by the name box. */

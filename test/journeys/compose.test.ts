@@ -3,7 +3,7 @@ import { readFileSync } from "node:fs";
 import { createRequire } from "node:module";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
 import { answer } from "../../src/cells/answer.js";
-import { axeFinds, cellShown, goTo, hasBrowser, Place, screenshot, type Visit } from "./browser.js";
+import { axeFinds, cellShown, goTo, hasBrowser, Place, screenshot, type Visit, patiently } from "./browser.js";
 
 const plate = (Ts: number, height: number): number =>
   answer("FREE.PLATE", { fluid: [["air"]], surface: [[Ts]], bulk: [[20]], height: [[height]] })[0]?.[0] as number;
@@ -31,15 +31,15 @@ describe.runIf(hasBrowser)("pages of the pane", () => {
     await page.locator("#box-height").fill("");
     await page.locator("#box-height").pressSequentially("450", { delay: 20 });
     await page.locator("#box-height-unit").selectOption("mm");
-    await expect.poll(() => page.locator("#compose-live").innerText()).toMatch(/4\.4\d+ W/);
+    await patiently(() => page.locator("#compose-live").innerText()).toMatch(/4\.4\d+ W/);
     expect(await page.locator("#compose-text").innerText()).toBe('=FILM.FREE.PLATE("air",80,20,"450 mm")');
     expect(await axeFinds(page, axe)).toEqual([]);
     await screenshot(page, "page-form", "#pane");
     await page.locator("#insert").click();
     await page.locator("#tab-this-cell").click();
-    await expect.poll(async () => Number(await cellShown(page, "B60"))).toBeCloseTo(plate(80, 0.45), 4);
+    await patiently(async () => Number(await cellShown(page, "B60"))).toBeCloseTo(plate(80, 0.45), 4);
     await page.keyboard.press("Control+z");
-    await expect.poll(() => cellShown(page, "B60")).toBe("");
+    await patiently(() => cellShown(page, "B60")).toBe("");
   });
 
   test("a fault stands under the box that it is about", async () => {
@@ -47,9 +47,9 @@ describe.runIf(hasBrowser)("pages of the pane", () => {
     await page.locator("#tab-new-formula").click();
     await page.locator("#choose-forced-cylinder").click();
     await page.locator("#box-speed").fill("3 m");
-    await expect.poll(() => page.locator("#fault-speed").innerText()).toMatch(/is a length; a speed/);
+    await patiently(() => page.locator("#fault-speed").innerText()).toMatch(/is a length; a speed/);
     await page.locator("#box-speed").fill("3");
-    await expect.poll(() => page.locator("#fault-speed").innerText()).toBe("");
+    await patiently(() => page.locator("#fault-speed").innerText()).toBe("");
   });
 
   test("cells are taken from the sheet, and a block beside them answers for all", async () => {
@@ -64,7 +64,7 @@ describe.runIf(hasBrowser)("pages of the pane", () => {
     await page.waitForTimeout(200);
     await page.locator("#box-surface-take").click();
     expect(await page.locator("#box-surface").inputValue()).toBe("B25:B28");
-    await expect.poll(() => page.locator("#compose-live").innerText()).toMatch(/W\/\(m²·K\)/);
+    await patiently(() => page.locator("#compose-live").innerText()).toMatch(/W\/\(m²·K\)/);
   });
 
   test("a table of cases is written with its head row and answers", async () => {
@@ -76,15 +76,15 @@ describe.runIf(hasBrowser)("pages of the pane", () => {
     await page.locator("#vary-from").fill("30");
     await page.locator("#vary-to").fill("80");
     await page.locator("#vary-count").fill("6");
-    await expect.poll(() => page.locator("#insert-table").innerText()).toContain("B62");
+    await patiently(() => page.locator("#insert-table").innerText()).toContain("B62");
     await page.locator("#insert-table").click();
     await page.locator("#tab-this-cell").click();
-    await expect.poll(async () => Number(await cellShown(page, "E68"))).toBeCloseTo(plate(80, 0.3), 4);
+    await patiently(async () => Number(await cellShown(page, "E68"))).toBeCloseTo(plate(80, 0.3), 4);
     expect(await cellShown(page, "B62")).toBe("surface [°C]");
     await page.locator("#tab-new-formula").click();
     await page.locator("#choose-free-plate").click();
     await page.locator("#insert-table").click();
-    await expect.poll(() => page.locator("#table-ask").innerText()).toMatch(/something in/);
+    await patiently(() => page.locator("#table-ask").innerText()).toMatch(/something in/);
   });
 
   test("an existing formula is opened in the form and changed in its place, what stands around it kept", async () => {
@@ -98,17 +98,17 @@ describe.runIf(hasBrowser)("pages of the pane", () => {
     await page.locator("#edit").click();
     expect(await page.locator("#box-height").inputValue()).toBe("0.3");
     await page.locator("#box-height").fill("0.6");
-    await expect.poll(() => page.locator("#compose-text").innerText()).toContain("0.6");
+    await patiently(() => page.locator("#compose-text").innerText()).toContain("0.6");
     await page.locator("#insert").click();
     await page.locator("#tab-this-cell").click();
-    await expect.poll(async () => Number(await cellShown(page, "D60"))).toBeCloseTo(2 * plate(80, 0.6), 4);
+    await patiently(async () => Number(await cellShown(page, "D60"))).toBeCloseTo(2 * plate(80, 0.6), 4);
   });
 
   test("the library is searched, an entry folded out, and used", async () => {
     const { page } = visit;
     await page.locator("#tab-library").click();
     await page.locator("#library-search").fill("glycol");
-    await expect.poll(() => page.locator("#library-body").innerText()).toMatch(/ethylene glycol/);
+    await patiently(() => page.locator("#library-body").innerText()).toMatch(/ethylene glycol/);
     await page.locator("#fluid-ethylene-glycol > summary").first().click();
     await page.locator("#fluid-ethylene-glycol .plot").first().waitFor();
     expect(await axeFinds(page, axe)).toEqual([]);
