@@ -4,13 +4,16 @@ import type { Explanation } from "../../cells/explanation.js";
 import { type ReadCell, readSelection } from "../cell-reading.js";
 import { el } from "../node.js";
 import type { Frame, Page } from "../page.js";
+import { show } from "../render.js";
 import { words } from "../words.js";
 import { reportText } from "./report.js";
 import { followSymbols } from "./symbols.js";
-import { type Actions, cellView, emptyView } from "./view.js";
+import { compareSection } from "./sections.js";
+import { type Actions, cellView, comparisonPlace, emptyView } from "./view.js";
 
 /** Long enough to let a held arrow key pass, short enough to feel immediate. */
 const pause = 90;
+const comparisonPause = 30;
 
 export const thisCellPage: Page = {
   id: "this-cell",
@@ -24,6 +27,7 @@ export const thisCellPage: Page = {
 class Follower {
   private timer: ReturnType<typeof setTimeout> | undefined;
   private round = 0;
+  private comparisonOpen = true;
   private chosen = { anchor: "", call: 0 };
   private readonly stops: (() => void)[];
 
@@ -65,7 +69,23 @@ class Follower {
     const anchor = JSON.stringify(cell.anchor);
     if (anchor !== this.chosen.anchor || this.chosen.call >= cell.calls.length) this.chosen = { anchor, call: 0 };
     const { call } = this.chosen;
-    this.frame.show(cellView(cell, call, explanationOf(cell, call), this.actions(cell)));
+    const explanation = explanationOf(cell, call);
+    const isOpen = this.frame.content.querySelector<HTMLDetailsElement>("#compare")?.open ?? this.comparisonOpen;
+    this.comparisonOpen = isOpen;
+    this.frame.show(cellView(cell, call, explanation, { ...this.actions(cell), later: true }));
+    this.fillComparison(explanation, this.round);
+  }
+
+  /** Every other equation is solved for this cell too: that waits until the reader has what was asked for. */
+  private fillComparison(explanation: Explanation | undefined, round: number): void {
+    const place = this.frame.content.querySelector<HTMLElement>(`#${comparisonPlace}`);
+    const finding = explanation?.finding;
+    if (place === null || finding === undefined) return;
+    setTimeout(() => {
+      if (round !== this.round || !place.isConnected) return;
+      const section = compareSection(finding.compare(), explanation?.units ?? "SI", this.comparisonOpen);
+      if (section !== undefined) show(place, [section]);
+    }, comparisonPause);
   }
 
   private actions(cell: ReadCell): Actions {

@@ -350,7 +350,7 @@ function causeItem(one: Contribution, largest: number, squares: number, units: "
   );
 }
 
-export function compareSection(alternatives: readonly Alternative[], units: "SI" | "US"): PageElement | undefined {
+export function compareSection(alternatives: readonly Alternative[], units: "SI" | "US", isOpen: boolean): PageElement | undefined {
   if (alternatives.length === 0) return undefined;
   const inRange = alternatives.filter((one) => one.inRange).length;
   const taken = alternatives.find((one) => one.chosen)?.h;
@@ -361,7 +361,7 @@ export function compareSection(alternatives: readonly Alternative[], units: "SI"
   return folded(
     "compare",
     `${words.compare.title}: ${words.compare.count(inRange, alternatives.length)}`,
-    true,
+    isOpen,
     el("p", { class: "quiet small" }, words.compare.says),
     el(
       "ul",

@@ -27,10 +27,14 @@ export interface Actions {
   choose(call: number): void;
   mend(formula: string): void;
   copyReport(): void;
+  /** True where the comparison, the costliest part, is filled in a moment later: see `comparisonPlace`. */
+  readonly later?: boolean;
   /** Absent while there is no such page. */
   compose?(): void;
   edit?(): void;
 }
+
+export const comparisonPlace = "comparison-place";
 
 export function emptyView(actions: Actions, address?: string): readonly Child[] {
   return [
@@ -128,7 +132,11 @@ function explained(cell: ReadCell, read: ReadCall, explanation: Explanation, act
     stateSection(steps),
     groupsSection(steps),
     finding === undefined ? undefined : boundsSection(finding, units),
-    finding === undefined ? undefined : compareSection(finding.compare(), units),
+    finding === undefined
+      ? undefined
+      : actions.later === true
+        ? el("div", { id: comparisonPlace })
+        : compareSection(finding.compare(), units, true),
     finding === undefined ? undefined : cautionsSection(finding.cautions()),
     steps.length > 0 ? traceSection(steps, actions.copyReport) : undefined,
   ];
