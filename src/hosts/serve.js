@@ -1,6 +1,6 @@
 // npm start: builds where the build is missing or older than the sources, then serves the standalone sheet to this machine only.
 import { spawnSync } from "node:child_process";
-import { createReadStream, existsSync, readdirSync, readFileSync, statSync } from "node:fs";
+import { createReadStream, existsSync, readdirSync, readFileSync, statSync, utimesSync } from "node:fs";
 import { createServer } from "node:http";
 import { dirname, extname, join, normalize, resolve, sep } from "node:path";
 import { pipeline } from "node:stream";
@@ -127,6 +127,9 @@ if (process.argv[1] !== undefined && resolve(process.argv[1]) === fileURLToPath(
     console.log("Building (about a minute) …");
     const { status } = spawnSync(process.execPath, [join(root, "src/hosts/build/build.js")], { stdio: "inherit" });
     if (status !== 0) process.exit(status ?? 1);
+    // The bundler leaves a file alone that comes out as it was: without a new date the next start would build again.
+    const now = new Date();
+    utimesSync(join(root, "dist/sheet.html"), now, now);
   }
   const { port } = await serve();
   console.log(`Filmbook: http://localhost:${port}/sheet.html   (Ctrl+C ends it)`);
