@@ -6,6 +6,7 @@ import { createRequire } from "node:module";
 import { tmpdir } from "node:os";
 import { dirname, join, resolve } from "node:path";
 import { fileURLToPath } from "node:url";
+import { summary } from "./origins.js";
 
 const root = resolve(dirname(fileURLToPath(import.meta.url)), "..");
 const require = createRequire(import.meta.url);
@@ -49,7 +50,13 @@ const args = [
 ];
 const { status } = spawnSync(process.execPath, args, { cwd: root, stdio: "inherit" });
 if (!existsSync(report)) process.exit(status || 1);
-const { numPassedTests: passed, numFailedTests: failed, numPendingTests: skipped } = JSON.parse(readFileSync(report, "utf8"));
+const { numPassedTests: passed, numFailedTests, numPendingTests: skipped, testResults } = JSON.parse(readFileSync(report, "utf8"));
 rmSync(folder, { recursive: true });
-console.log(`\n${passed} passed, ${failed} failed${skipped > 0 ? `, ${skipped} skipped` : ""}`);
-process.exit(status || (passed === 0 ? 1 : 0));
+// A file that cannot even be loaded has no tests to count: it counts as one that failed.
+const unloaded = testResults.filter((file) => file.status === "failed" && file.assertionResults.length === 0).length;
+const failed = numFailedTests + unloaded;
+console.log(`\n${summary()}`);
+if (skipped > 0)
+  console.log(`*** ${skipped} tests were LEFT OUT, for want of ${lacking.map(([name]) => name).join(" and ") || "their tools"}. ***`);
+console.log(`\n${passed} passed, ${failed} failed`);
+process.exit(status || (passed === 0 || failed > 0 ? 1 : 0));
