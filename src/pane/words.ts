@@ -135,6 +135,15 @@ export const words = {
     count: (inRange: number, all: number): string => `${inRange} of ${all} in range`,
   },
 
+  whatIf: {
+    title: "What if …",
+    input: "Move one input",
+    slider: (name: string): string => `Try another ${name}`,
+    says: "Only a trial: nothing in the sheet changes. The upright line is the cell as it stands; where the curve is broken, the equation is out of its range.",
+    plot: (name: string, unit: string, h: string): string => `h in ${h} against ${name} in ${unit}, with its bounds`,
+    axes: (name: string, unit: string, h: string): string => `h [${h}] with its bounds, against ${name} [${unit}]`,
+  },
+
   cautions: { title: "Cautions", none: "None for this case. Local codes and licensed practice come first." },
 
   trace: { title: "Every step", copy: "Copy as text for a report", copied: "Copied.", copyBelow: "Copy the text from here:" },

@@ -89,6 +89,24 @@ describe.runIf(hasBrowser)("the pane", () => {
     await page.keyboard.press("ArrowRight");
   });
 
+  test("what if: another value is tried with the arrow keys, the sheet stays as it is", async () => {
+    const { page } = visit;
+    await goTo(page, "B5");
+    await page.locator("#what-if > summary").click();
+    await page.locator("#what-if .plot").waitFor();
+    const before = await page.locator("#what-if-says").innerText();
+    expect(before).toMatch(/surface 80 °C: h 5 W/);
+    await page.locator("#what-if-slider").focus();
+    await page.keyboard.press("ArrowRight");
+    await page.keyboard.press("ArrowRight");
+    expect(await page.locator("#what-if-says").innerText()).not.toBe(before);
+    expect(await axeFinds(page, axeSource)).toEqual([]);
+    await page.locator("#what-if-input").selectOption("height");
+    expect(await page.locator("#what-if-says").innerText()).toMatch(/height 0\.3 m/);
+    await screenshot(page, "pane-what-if", "#what-if");
+    await page.locator("#what-if > summary").click();
+  });
+
   test("the report is copied as text", async () => {
     const { page } = visit;
     await goTo(page, "B5");

@@ -9,6 +9,8 @@ import { words } from "../words.js";
 import { reportText } from "./report.js";
 import { followSymbols } from "./symbols.js";
 import { compareSection } from "./sections.js";
+import { caseAt } from "./what-if.js";
+import { WhatIf } from "./what-if-view.js";
 import { type Actions, cellView, comparisonPlace, emptyView } from "./view.js";
 
 /** Long enough to let a held arrow key pass, short enough to feel immediate. */
@@ -28,6 +30,7 @@ class Follower {
   private timer: ReturnType<typeof setTimeout> | undefined;
   private round = 0;
   private comparisonOpen = true;
+  private movedInput = "surface";
   private chosen = { anchor: "", call: 0 };
   private readonly stops: (() => void)[];
 
@@ -88,6 +91,16 @@ class Follower {
     }, comparisonPause);
   }
 
+  private fillWhatIf(cell: ReadCell, place: HTMLElement): void {
+    const read = cell.calls[this.chosen.call];
+    const explanation = explanationOf(cell, this.chosen.call);
+    const one = read === undefined || explanation === undefined ? undefined : caseAt(read, explanation.caseNumber);
+    if (one === undefined || explanation === undefined) return;
+    new WhatIf(place, one, explanation.units, this.movedInput, (key) => {
+      this.movedInput = key;
+    });
+  }
+
   private actions(cell: ReadCell): Actions {
     const read = cell.calls[this.chosen.call];
     const { frame } = this;
@@ -98,6 +111,7 @@ class Follower {
       },
       mend: (formula) => void this.write(cell, formula),
       copyReport: () => void this.copyReport(cell),
+      whatIf: (place) => this.fillWhatIf(cell, place),
       ...(frame.has("new-formula")
         ? {
             compose: () => frame.open("new-formula"),

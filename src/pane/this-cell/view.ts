@@ -27,6 +27,8 @@ export interface Actions {
   choose(call: number): void;
   mend(formula: string): void;
   copyReport(): void;
+  /** Told when the part "What if" is folded out, with the place to fill. */
+  whatIf?(place: HTMLElement): void;
   /** True where the comparison, the costliest part, is filled in a moment later: see `comparisonPlace`. */
   readonly later?: boolean;
   /** Absent while there is no such page. */
@@ -137,10 +139,25 @@ function explained(cell: ReadCell, read: ReadCall, explanation: Explanation, act
       : actions.later === true
         ? el("div", { id: comparisonPlace })
         : compareSection(finding.compare(), units, true),
+    finding !== undefined && steps.length > 0 && actions.whatIf !== undefined ? whatIfPart(actions.whatIf) : undefined,
     finding === undefined ? undefined : cautionsSection(finding.cautions()),
     steps.length > 0 ? traceSection(steps, actions.copyReport) : undefined,
   ];
   return list.filter((one): one is Child => one !== undefined);
+}
+
+function whatIfPart(unfold: (place: HTMLElement) => void): PageElement {
+  const opened = (event: Event): void => {
+    const details = event.target as HTMLDetailsElement;
+    const place = details.querySelector<HTMLElement>("#what-if-place");
+    if (details.open && place !== null && place.childElementCount === 0) unfold(place);
+  };
+  return el(
+    "details",
+    { class: "part what-if", id: "what-if", toggle: opened },
+    el("summary", {}, el("h3", {}, words.whatIf.title)),
+    el("div", { id: "what-if-place" }),
+  );
 }
 
 /** The sentences that the grid cannot show, and the changes that would mend them. */
