@@ -22,6 +22,7 @@ class Pane {
   private readonly content: HTMLElement;
   private readonly says: HTMLElement;
   private endPage: () => void = () => undefined;
+  private current: Frame | undefined;
   private readonly stopTheme: () => void;
 
   constructor(
@@ -64,20 +65,26 @@ class Pane {
     this.says.textContent = "";
     this.content.replaceChildren();
     this.content.scrollTop = 0;
-    this.endPage = page.begin(this.frame(), errand);
+    const frame = this.frame();
+    this.current = frame;
+    this.endPage = page.begin(frame, errand);
   }
 
+  /** What a page has left under way when it is left must not appear in the next one. */
   private frame(): Frame {
-    return {
+    const frame: Frame = {
       host: this.host,
       content: this.content,
-      show: (children) => show(this.content, children),
+      show: (children) => {
+        if (this.current === frame) show(this.content, children);
+      },
       open: (page, errand = {}) => this.open(page, errand),
       has: (page) => this.pages.some((one) => one.id === page),
       say: (sentence) => {
-        this.says.textContent = sentence;
+        if (this.current === frame) this.says.textContent = sentence;
       },
     };
+    return frame;
   }
 
   private async followTheme(): Promise<void> {

@@ -134,9 +134,15 @@ describe.runIf(hasBrowser)("pages of the pane", () => {
   ] as const)("every page fits at %d px, %s", async (width, colorScheme) => {
     const one = await place.sheet({ viewport: { width, height: 1000 }, colorScheme });
     try {
-      for (const tab of ["new-formula", "library", "cautions"]) {
+      for (const tab of ["new-formula", "library", "cautions"] as const) {
         await one.page.locator(`#tab-${tab}`).click();
         await one.page.waitForTimeout(200);
+        const heading = {
+          "new-formula": "New formula",
+          library: "Surfaces and fluids",
+          cautions: "What these numbers are, and what they are not",
+        }[tab];
+        expect(await one.page.locator("#page-title").innerText()).toBe(heading);
         if (tab === "library") await one.page.locator("#surface-free-plate > summary").click();
         await one.page.waitForTimeout(200);
         await screenshot(one.page, `${tab}-${width}-${colorScheme}`);

@@ -29,6 +29,7 @@ export const thisCellPage: Page = {
 class Follower {
   private timer: ReturnType<typeof setTimeout> | undefined;
   private round = 0;
+  private hasEnded = false;
   private comparisonOpen = true;
   private movedInput = "surface";
   private chosen = { anchor: "", call: 0 };
@@ -42,12 +43,14 @@ class Follower {
   }
 
   end(): void {
+    this.hasEnded = true;
     clearTimeout(this.timer);
     this.round++;
     for (const stop of this.stops) stop();
   }
 
   private soon(): void {
+    if (this.hasEnded) return;
     clearTimeout(this.timer);
     this.timer = setTimeout(() => void this.refresh(), pause);
   }
