@@ -43,7 +43,7 @@ const args = [
   "run",
   "--config",
   "test/vitest.config.ts",
-  "--reporter=dot",
+  "--reporter=default",
   "--reporter=json",
   `--outputFile.json=${report}`,
   ...only,
